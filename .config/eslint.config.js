@@ -16,7 +16,17 @@ const crossesFolders = never(
 )
 
 export default tseslint.config(
-  { ignores: ['dist/**', 'node_modules/**', 'drizzle/**', '.data/**', '.cache/**', 'test-results/**', 'playwright-report/**'] },
+  {
+    ignores: [
+      'dist/**',
+      'node_modules/**',
+      'drizzle/**',
+      '.data/**',
+      '.cache/**',
+      'test-results/**',
+      'playwright-report/**',
+    ],
+  },
   {
     files: ['**/*.{ts,tsx}'],
     extends: [tseslint.configs.recommendedTypeChecked],
@@ -35,24 +45,37 @@ export default tseslint.config(
     },
   },
   { files: ['site/**/*.{ts,tsx}'], ...hooks.configs.flat['recommended-latest'] },
-  boundary(['calc/**/*.ts'], [
-    crossesFolders,
-    never('^#(content|api|site)/', 'calc stands alone.'),
-    never('^(?!\\.|#calc/|mathjs$)', 'calc imports nothing outside itself but mathjs.'),
-  ], ['calc/**/*.test.ts', 'calc/bench/**']),
+  boundary(
+    ['calc/**/*.ts'],
+    [
+      crossesFolders,
+      never('^#(content|api|site)/', 'calc stands alone.'),
+      never('^(?!\\.|#calc/|mathjs$)', 'calc imports nothing outside itself but mathjs.'),
+    ],
+    ['calc/**/*.test.ts', 'calc/bench/**'],
+  ),
   boundary(['content/**/*.ts'], [crossesFolders, never('^#(api|site)/', 'content knows only calc.')]),
   boundary(['api/**/*.ts'], [crossesFolders, never('^#site/', 'the server does not know the site.')]),
-  boundary(['site/src/**/*.{ts,tsx}'], [
-    crossesFolders,
-    never('^#api/(?!.*dto/.*\\.schema\\.ts$)', 'site shares only the request and response schemas of the server.'),
-    never('^#calc/marking', 'answers and mistakes never reach the browser.'),
-    never('question-bank|\\.questions\\.yaml', 'banks never reach the browser.'),
-  ]),
-  boundary(['site/src/features/**/*.{ts,tsx}'], [
-    crossesFolders,
-    never('^#api/(?!.*dto/.*\\.schema\\.ts$)', 'site shares only the request and response schemas of the server.'),
-    never('^#calc/marking', 'answers and mistakes never reach the browser.'),
-    never('question-bank|\\.questions\\.yaml', 'banks never reach the browser.'),
-    never('(^#site/features/|^\\.\\./[a-z-]+/|^\\.\\./\\.\\./features/)', 'features do not import each other: move what two need to components or lib.'),
-  ]),
+  boundary(
+    ['site/src/**/*.{ts,tsx}'],
+    [
+      crossesFolders,
+      never('^#api/(?!.*dto/.*\\.schema\\.ts$)', 'site shares only the request and response schemas of the server.'),
+      never('^#calc/marking', 'answers and mistakes never reach the browser.'),
+      never('question-bank|\\.questions\\.yaml', 'banks never reach the browser.'),
+    ],
+  ),
+  boundary(
+    ['site/src/features/**/*.{ts,tsx}'],
+    [
+      crossesFolders,
+      never('^#api/(?!.*dto/.*\\.schema\\.ts$)', 'site shares only the request and response schemas of the server.'),
+      never('^#calc/marking', 'answers and mistakes never reach the browser.'),
+      never('question-bank|\\.questions\\.yaml', 'banks never reach the browser.'),
+      never(
+        '(^#site/features/|^\\.\\./[a-z-]+/|^\\.\\./\\.\\./features/)',
+        'features do not import each other: move what two need to components or lib.',
+      ),
+    ],
+  ),
 )

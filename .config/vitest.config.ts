@@ -12,7 +12,13 @@ export default defineConfig({
       { root, test: { name: 'content', include: ['content/**/*.test.ts'], environment: 'node', testTimeout: 60_000 } },
       {
         root,
-        test: { name: 'api', include: ['api/**/*.spec.ts', 'api/**/*.e2e-spec.ts'], environment: 'node', testTimeout: 60_000, hookTimeout: 60_000 },
+        test: {
+          name: 'api',
+          include: ['api/**/*.spec.ts', 'api/**/*.e2e-spec.ts'],
+          environment: 'node',
+          testTimeout: 60_000,
+          hookTimeout: 60_000,
+        },
       },
       { root, test: { name: 'site', include: ['site/**/*.test.{ts,tsx}'], environment: 'node', testTimeout: 60_000 } },
     ],
