@@ -1,0 +1,122 @@
+import type {
+  CalculatorDefinition,
+  Cell,
+  Columns,
+  Input,
+  Inputs,
+  InputValue,
+  PlainRow,
+  PlainValue,
+} from './definition.ts'
+import { CalculationError } from './errors.ts'
+import { say } from './units/format.ts'
+
+const between = (cell: Extract<Cell, { kind: 'scalar' }>): string =>
+  `between ${say(cell.range[0], cell.quantity, cell.unit)} and ${say(cell.range[1], cell.quantity, cell.unit)}`
+
+const checkCell = (cell: Cell, field: string, value: unknown): PlainValue => {
+  if (cell.kind === 'choice') {
+    if (typeof value === 'string' && cell.of.includes(value)) return value
+    throw new CalculationError('out-of-range', field, `${cell.label}: choose one of ${cell.of.join(', ')}.`)
+  }
+  if (typeof value !== 'number' || !Number.isFinite(value))
+    throw new CalculationError('not-finite', field, `${cell.label}: give a number ${between(cell)}.`)
+  if (value < cell.range[0] || value > cell.range[1])
+    throw new CalculationError('out-of-range', field, `${cell.label} must lie ${between(cell)}.`)
+  if (cell.whole && !Number.isInteger(value))
+    throw new CalculationError('out-of-range', field, `${cell.label}: give a whole number ${between(cell)}.`)
+  return value
+}
+
+const isRecord = (value: unknown): value is Record<string, unknown> =>
+  typeof value === 'object' && value !== null && !Array.isArray(value)
+
+const checkColumns = (columns: Columns, label: string, field: string, value: unknown): PlainRow => {
+  if (!isRecord(value)) throw new CalculationError('not-finite', field, `${label}: give its values by name.`)
+  for (const key of Object.keys(value))
+    if (!Object.hasOwn(columns, key))
+      throw new CalculationError('unknown-key', `${field}.${key}`, `${label} has no value called “${key}”.`)
+  const row: Record<string, PlainValue> = {}
+  for (const key of Object.keys(columns)) {
+    const cell = columns[key]!
+    const cellValue = value[key]
+    if (cellValue !== undefined) row[key] = checkCell(cell, `${field}.${key}`, cellValue)
+    else if (cell.fallback !== undefined) row[key] = cell.fallback
+    else if (!cell.optional) throw new CalculationError('missing', `${field}.${key}`, `${cell.label} is wanted.`)
+  }
+  return row
+}
+
+const checkInput = (input: Input, key: string, value: unknown): InputValue => {
+  switch (input.kind) {
+    case 'scalar':
+    case 'choice':
+      return checkCell(input, key, value)
+    case 'group':
+      return checkColumns(input.columns, input.label, key, value)
+    case 'rows': {
+      if (!Array.isArray(value)) throw new CalculationError('not-finite', key, `${input.label}: give a list.`)
+      const rows: readonly unknown[] = value
+      if (rows.length < input.least)
+        throw new CalculationError(
+          rows.length === 0 ? 'missing' : 'out-of-range',
+          key,
+          `${input.label}: give at least ${input.least} ${input.row}${input.least === 1 ? '' : 's'}.`,
+        )
+      if (rows.length > input.most)
+        throw new CalculationError('out-of-range', key, `${input.label}: give at most ${input.most} ${input.row}s.`)
+      return rows.map((row, i) =>
+        checkColumns(input.columns, `${input.label}, ${input.row} ${i + 1}`, `${key}[${i}]`, row),
+      )
+    }
+  }
+}
+
+/**
+ * Checks raw inputs against a definition, once, for everyone: shape, unknown keys, alternatives, missing keys, finiteness and range.
+ * Fallbacks are filled in. Throws `CalculationError` naming the field; never changes a value.
+ */
+export const checkInputs = (definition: CalculatorDefinition, raw: unknown): Inputs => {
+  if (!isRecord(raw))
+    throw new CalculationError('missing', Object.keys(definition.inputs)[0]!, 'Give the inputs by name.')
+  const { inputs } = definition
+  for (const key of Object.keys(raw))
+    if (!Object.hasOwn(inputs, key))
+      throw new CalculationError('unknown-key', key, `${definition.title} has no input called “${key}”.`)
+
+  const given: Record<string, InputValue> = {}
+  const isGiven = (key: string) => raw[key] !== undefined
+  const label = (key: string) => inputs[key]?.label ?? key
+  const namedFirst = new Set<string>()
+
+  for (const key of Object.keys(inputs)) {
+    const input = inputs[key]!
+    if (input.or !== undefined && !namedFirst.has(input.or)) {
+      namedFirst.add(key)
+      if (isGiven(key) && isGiven(input.or))
+        throw new CalculationError(
+          'inconsistent',
+          input.or,
+          `Give ${label(key)} or ${label(input.or)}, not both: the one decides the other.`,
+        )
+      if (!isGiven(key) && !isGiven(input.or))
+        throw new CalculationError('missing', key, `Give ${label(key)} or ${label(input.or)}.`)
+    }
+    if (input.goesWith !== undefined && isGiven(key) !== isGiven(input.goesWith))
+      throw isGiven(key)
+        ? new CalculationError(
+            'inconsistent',
+            key,
+            `${input.label} goes with ${label(input.goesWith)}; leave it out without that.`,
+          )
+        : new CalculationError('missing', key, `${input.label} is wanted with ${label(input.goesWith)}.`)
+    if (input.needs !== undefined && isGiven(key) && !isGiven(input.needs))
+      throw new CalculationError('missing', input.needs, `${label(input.needs)} is wanted with ${input.label}.`)
+
+    if (isGiven(key)) given[key] = checkInput(input, key, raw[key])
+    else if ('fallback' in input && input.fallback !== undefined) given[key] = input.fallback
+    else if (!input.optional && input.or === undefined && input.goesWith === undefined && input.needs === undefined)
+      throw new CalculationError('missing', key, `${input.label} is wanted.`)
+  }
+  return given
+}

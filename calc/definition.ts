@@ -1,0 +1,217 @@
+/** What a calculator is. Every screen, route, question and working reads one of these objects. */
+import type { Formula, WriteFormula } from './formula.ts'
+
+export type Quantity =
+  | 'head'
+  | 'length'
+  | 'flow'
+  | 'velocity'
+  | 'power'
+  | 'energy'
+  | 'pressure'
+  | 'density'
+  | 'dynamicViscosity'
+  | 'kinematicViscosity'
+  | 'temperature'
+  | 'rotation'
+  | 'angle'
+  | 'area'
+  | 'gradient'
+  | 'fraction'
+  | 'ratio'
+  | 'count'
+
+export type Hazard = 'pressure' | 'electricity' | 'stream' | 'hot-work' | 'rotating' | 'lifting' | 'digging'
+
+export type Station =
+  | 'stream'
+  | 'intake'
+  | 'leat'
+  | 'forebay'
+  | 'pipe'
+  | 'valve'
+  | 'jet'
+  | 'runner'
+  | 'alternator'
+  | 'cable'
+  | 'load'
+  | 'scheme'
+
+interface Said {
+  label: string
+  /** TeX. */
+  symbol?: string
+  help?: string
+}
+
+/**
+ * When an input may stay away:
+ * - `optional`: it may always; `fallback` is what then counts, where there is one.
+ * - `or`: exactly one of this key and that one is given.
+ * - `goesWith`: given exactly when that key is.
+ * - `needs`: optional, and only with that key.
+ */
+interface Absence {
+  optional?: true
+  or?: string
+  goesWith?: string
+  needs?: string
+}
+
+export type Scalar = Said &
+  Absence & {
+    kind: 'scalar'
+    quantity: Quantity
+    /** SI; refused outside. */
+    range: readonly [number, number]
+    /** SI; a caution outside. */
+    usual?: readonly [number, number]
+    /** Whole numbers only. */
+    whole?: true
+    /** What a form shows first; of an optional input, absent means empty. */
+    initial?: number
+    /** What counts when it is not given. */
+    fallback?: number
+    /** The unit a form starts with, where it is not the first of the quantity. */
+    unit?: string
+  }
+export type Choice<V extends string = string> = Said &
+  Absence & {
+    kind: 'choice'
+    of: readonly V[]
+    /** Words for the choices, where the value itself does not read well. */
+    words?: Readonly<Record<V, string>>
+    initial?: V
+    fallback?: V
+  }
+export type Cell = Scalar | Choice
+export type Columns = Record<string, Cell>
+/** A list of rows, such as the sections of a pipe. */
+export type Rows = Said &
+  Absence & {
+    kind: 'rows'
+    /** What one row is called: "section". */
+    row: string
+    columns: Columns
+    least: number
+    most: number
+    initial?: readonly Record<string, number | string>[]
+  }
+/** A few values that are given together, such as the nozzles that are open. */
+export type Group = Said & Absence & { kind: 'group'; columns: Columns; initial?: Record<string, number | string> }
+export type Input = Scalar | Choice | Rows | Group
+
+interface ScalarOutput extends Said {
+  kind: 'scalar'
+  quantity: Quantity
+  /** Significant digits shown; 3 unless told. */
+  digits?: number
+  unit?: string
+  /** Absent when it cannot be worked out. */
+  sometimes?: true
+}
+interface TextOutput extends Said {
+  kind: 'text'
+  /** Words for the values, where the value itself does not read well. */
+  words?: Readonly<Record<string, string>>
+  sometimes?: true
+}
+interface RowsOutput extends Said {
+  kind: 'rows'
+  columns: Record<string, ScalarOutput | TextOutput>
+  sometimes?: true
+}
+export type Output = ScalarOutput | TextOutput | RowsOutput
+
+type Spread<T> = { [K in keyof T]: T[K] }
+type CellValue<C> = C extends { kind: 'choice'; of: readonly (infer V)[] } ? V : number
+type MayMiss<I> = I extends { fallback: number | string }
+  ? false
+  : I extends { optional: true } | { or: string } | { goesWith: string } | { needs: string }
+    ? true
+    : false
+type Record_<C> = Spread<
+  { [K in keyof C as MayMiss<C[K]> extends true ? never : K]: CellValue<C[K]> } & {
+    [K in keyof C as MayMiss<C[K]> extends true ? K : never]?: CellValue<C[K]>
+  }
+>
+type ValueOf<I> = I extends { kind: 'rows'; columns: infer C }
+  ? readonly Record_<C>[]
+  : I extends { kind: 'group'; columns: infer C }
+    ? Record_<C>
+    : CellValue<I>
+/** What `solve` is handed: checked, SI, fallbacks filled in. */
+export type Given<I> = Spread<
+  { [K in keyof I as MayMiss<I[K]> extends true ? never : K]: ValueOf<I[K]> } & {
+    [K in keyof I as MayMiss<I[K]> extends true ? K : never]?: ValueOf<I[K]>
+  }
+>
+type OutValue<O> = O extends { kind: 'rows'; columns: infer C }
+  ? readonly Found<C>[]
+  : O extends { kind: 'text' }
+    ? string
+    : number
+export type Found<O> = Spread<
+  { [K in keyof O as O[K] extends { sometimes: true } ? never : K]: OutValue<O[K]> } & {
+    [K in keyof O as O[K] extends { sometimes: true } ? K : never]?: OutValue<O[K]>
+  }
+>
+
+export interface Step<K extends string = string> {
+  say: string
+  formula?: Formula<K>
+  /** The output that this step works out. */
+  gives?: K
+}
+export interface Caution<K extends string = string> {
+  level: 'note' | 'check' | 'stop'
+  about: readonly K[]
+  /** The danger it warns of, where there is one. */
+  hazard?: Hazard
+  say: string
+}
+export interface Source {
+  author: string
+  title: string
+  year: number
+  where?: string
+}
+
+type Keys<I, O> = Extract<keyof I | keyof O, string>
+export interface Calculator<I extends Record<string, Input>, O extends Record<string, Output>> {
+  id: string
+  station: Station
+  title: string
+  summary: string
+  hazards: readonly Hazard[]
+  inputs: I
+  outputs: O
+  /** SI in, SI out. Shape, range and finiteness were checked against `inputs` before this is called. */
+  solve(given: Given<I>): Found<O>
+  working(write: WriteFormula<Keys<I, O>>, given: Given<I>, found: Found<O>): readonly Step<Keys<I, O>>[]
+  cautions(given: Given<I>, found: Found<O>): readonly Caution<Keys<I, O>>[]
+  doesNotCheck: readonly string[]
+  sources: readonly Source[]
+}
+
+/** Lets the compiler check a calculator's keys, choices and rows against its own declaration. */
+export const defineCalculator = <const I extends Record<string, Input>, const O extends Record<string, Output>>(
+  calculator: Calculator<I, O>,
+) => calculator
+
+export type PlainValue = number | string
+export type PlainRow = Readonly<Record<string, PlainValue | undefined>>
+export type InputValue = PlainValue | PlainRow | readonly PlainRow[]
+export type Inputs = Readonly<Record<string, InputValue | undefined>>
+export type OutputValue = PlainValue | readonly PlainRow[]
+export type Outputs = Readonly<Record<string, OutputValue | undefined>>
+
+/** A calculator as those see it who read definitions without knowing which one it is. */
+export interface CalculatorDefinition extends Omit<
+  Calculator<Record<string, Input>, Record<string, Output>>,
+  'solve' | 'working' | 'cautions'
+> {
+  solve(given: Inputs): Outputs
+  working(write: WriteFormula<string>, given: Inputs, found: Outputs): readonly Step[]
+  cautions(given: Inputs, found: Outputs): readonly Caution[]
+}

@@ -1,0 +1,22 @@
+/** The library's public entry. */
+export { calculators, type CalculatorId } from './calculators.ts'
+export { CalculationError, type CalculationErrorCode } from './errors.ts'
+export { calculate, calculator, solve, type Solution } from './solve.ts'
+export { monteCarlo, withUncertainty, type StandardUncertainties } from './uncertainty.ts'
+export type { PrintedStep } from './print.ts'
+export type {
+  CalculatorDefinition,
+  Caution,
+  Cell,
+  Columns,
+  Hazard,
+  Input,
+  Inputs,
+  InputValue,
+  Output,
+  Outputs,
+  PlainRow,
+  PlainValue,
+  Quantity,
+  Station,
+} from './definition.ts'

@@ -1,0 +1,105 @@
+import type { CalculatorDefinition, Inputs, Outputs, Quantity, Step } from './definition.ts'
+import { fill, speak, spoken, type Aside } from './formula.ts'
+import { conversion, quantities } from './units/quantities.ts'
+import { formatNumber, unitFor } from './units/format.ts'
+
+/** A step of a working, printed: TeX with symbols, TeX with this calculation's numbers, and words. */
+export interface PrintedStep {
+  say: string
+  symbols?: string
+  numbers?: string
+  speech?: string
+  gives?: string
+}
+
+const digitsPutIn = 4
+
+const superscript: Record<string, string> = {
+  '⁻': '-',
+  '⁰': '0',
+  '¹': '1',
+  '²': '2',
+  '³': '3',
+  '⁴': '4',
+  '⁵': '5',
+  '⁶': '6',
+  '⁷': '7',
+  '⁸': '8',
+  '⁹': '9',
+}
+
+const texNumber = (value: number, digits: number): string => {
+  const text = formatNumber(value, digits)
+    .replace('−', '-')
+    .replace(/\u00a0/g, '{\\,}')
+  const power = /^(.*) ×(?:\u00a0| )?10([⁻⁰¹²³⁴-⁹]+)$/.exec(
+    text.replace('{\\,}×{\\,}', ' ×').replace(/{\\,}/g, '\u00a0'),
+  )
+  if (!power) return text
+  return `${power[1]!.trim()}\\times 10^{${[...power[2]!].map((c) => superscript[c]).join('')}}`
+}
+
+/** A number put in for a symbol: as short as it is exact, at most four digits, in brackets where it would not stand alone. */
+const putIn = (value: number, digits = digitsPutIn): string => {
+  const short = Number(value.toPrecision(digits))
+  const exact = String(Math.abs(short))
+  const tex =
+    /e/.test(exact) || Math.abs(short) >= 10_000 || (short !== 0 && Math.abs(short) < 1e-4)
+      ? texNumber(value, digits)
+      : exact
+  return value < 0 || tex.includes('times') ? `(${value < 0 ? '-' : ''}${tex.replace('-', value < 0 ? '' : '-')})` : tex
+}
+
+const texUnit = (unit: string): string =>
+  unit === ''
+    ? ''
+    : unit === '°'
+      ? '^\\circ'
+      : `\\;\\mathrm{${unit.replace('°', '^\\circ ').replace(/³/g, '^3').replace(/²/g, '^2').replace(/·/g, '\\,').replace('%', '\\%').replace(/ /g, '\\ ')}}`
+
+/** A result in SI and, where people would say it otherwise, in that unit too. */
+const result = (value: number, quantity: Quantity, digits: number, unit?: string): string => {
+  const si = quantities[quantity].si
+  const natural = unitFor(quantity, value, unit)
+  const inSi = `= ${texNumber(value, digits)}${texUnit(si.name)}`
+  return natural.name === si.name
+    ? inSi
+    : `${inSi} = ${texNumber(conversion(quantity, natural)!.fromSi(value), digits)}${texUnit(natural.name)}`
+}
+
+/** `\,` stands for an unwritten "times": a thin space between symbols, a sign between numbers. */
+const timesBetweenNumbers = (tex: string): string => tex.replace(/\\,/g, '\\times ')
+
+/** Prints a calculator's working for one calculation. */
+export const printWorking = (
+  definition: CalculatorDefinition,
+  steps: readonly Step[],
+  given: Inputs,
+  found: Outputs,
+): PrintedStep[] =>
+  steps.map(({ say, formula, gives }) => {
+    if (!formula) return { say, ...(gives === undefined ? {} : { gives }) }
+    const said = (key: string) => definition.outputs[key] ?? definition.inputs[key]!
+    const symbol = (hole: string | Aside) =>
+      typeof hole === 'string' ? (said(hole).symbol ?? `\\text{${said(hole).label}}`) : hole.symbol
+    const number = (hole: string | Aside) => {
+      if (typeof hole !== 'string') return putIn(hole.value, hole.digits)
+      const value = hole === gives ? undefined : (found[hole] ?? given[hole])
+      return typeof value === 'number' ? putIn(value) : symbol(hole)
+    }
+    const word = (hole: string | Aside) =>
+      spoken(typeof hole === 'string' ? said(hole).label.replace(/^[A-Z](?![A-Z])/, (c) => c.toLowerCase()) : hole.say)
+    const output = gives === undefined ? undefined : definition.outputs[gives]
+    const value = gives === undefined ? undefined : found[gives]
+    const end =
+      output?.kind === 'scalar' && typeof value === 'number'
+        ? ` ${result(value, output.quantity, output.digits ?? 3, output.unit)}`
+        : ''
+    return {
+      say,
+      symbols: fill(formula, symbol),
+      numbers: timesBetweenNumbers(fill(formula, number)) + end,
+      speech: speak(fill(formula, word)),
+      ...(gives === undefined ? {} : { gives }),
+    }
+  })

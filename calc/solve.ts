@@ -1,0 +1,106 @@
+import { calculators, type CalculatorId } from './calculators.ts'
+import { checkInputs } from './check.ts'
+import type {
+  CalculatorDefinition,
+  Caution,
+  Cell,
+  Inputs,
+  InputValue,
+  Outputs,
+  OutputValue,
+  PlainRow,
+} from './definition.ts'
+import { CalculationError } from './errors.ts'
+import { writeFormula } from './formula.ts'
+import { printWorking, type PrintedStep } from './print.ts'
+import { say } from './units/format.ts'
+
+export interface Solution {
+  outputs: Outputs
+  working: PrintedStep[]
+  cautions: Caution[]
+}
+
+const isKnown = (id: string): id is CalculatorId => Object.hasOwn(calculators, id)
+
+/** The definition with this id; throws a RangeError for an id that there is not. */
+export const calculator = (id: string): CalculatorDefinition => {
+  if (!isKnown(id)) throw new RangeError(`There is no calculator “${id}”.`)
+  return calculators[id]
+}
+
+const isBadNumber = (value: unknown): boolean => typeof value === 'number' && !Number.isFinite(value)
+
+const isBad = (value: OutputValue | undefined): boolean =>
+  Array.isArray(value)
+    ? (value as readonly PlainRow[]).some((row) => Object.values(row).some(isBadNumber))
+    : isBadNumber(value)
+
+/** Solves what was checked already; no output is ever NaN or infinite. */
+const found = (definition: CalculatorDefinition, given: Inputs): Outputs => {
+  const outputs = definition.solve(given)
+  for (const key of Object.keys(outputs))
+    if (isBad(outputs[key]))
+      throw new CalculationError(
+        'no-solution',
+        Object.keys(definition.inputs)[0]!,
+        `${definition.outputs[key]?.label ?? key} cannot be worked out from these numbers.`,
+      )
+  return outputs
+}
+
+/** Checks and solves, without working or cautions: for roots, uncertainties and marking. */
+export const calculate = (id: string, inputs: unknown): Outputs => {
+  const definition = calculator(id)
+  return found(definition, checkInputs(definition, inputs))
+}
+
+const unusual = (cell: Cell, key: string, name: string, value: unknown): Caution[] =>
+  cell.kind === 'scalar' && cell.usual && typeof value === 'number' && (value < cell.usual[0] || value > cell.usual[1])
+    ? [
+        {
+          level: 'check',
+          about: [key],
+          say: `${name} of ${say(value, cell.quantity, cell.unit)} is unusual: it mostly lies between ${say(cell.usual[0], cell.quantity, cell.unit)} and ${say(cell.usual[1], cell.quantity, cell.unit)}.`,
+        },
+      ]
+    : []
+
+const rowsOf = (value: InputValue | undefined): readonly PlainRow[] =>
+  Array.isArray(value) ? (value as readonly PlainRow[]) : typeof value === 'object' ? [value as PlainRow] : []
+
+/** One caution for each given value outside its usual range. */
+const unusualValues = (definition: CalculatorDefinition, given: Inputs): Caution[] =>
+  Object.entries(definition.inputs).flatMap(([key, input]) =>
+    input.kind === 'scalar' || input.kind === 'choice'
+      ? unusual(input, key, input.label, given[key])
+      : rowsOf(given[key]).flatMap((row, i) =>
+          Object.entries(input.columns).flatMap(([name, cell]) =>
+            unusual(
+              cell,
+              key,
+              input.kind === 'rows' ? `${cell.label} in ${input.row} ${i + 1}` : cell.label,
+              row[name],
+            ),
+          ),
+        ),
+  )
+
+const worstFirst = { stop: 0, check: 1, note: 2 }
+
+/**
+ * Solves a calculator by its id: outputs in SI under the keys of its definition, the printed working, the cautions (worst first).
+ * Throws `CalculationError` for bad input.
+ */
+export const solve = (id: string, inputs: unknown): Solution => {
+  const definition = calculator(id)
+  const given = checkInputs(definition, inputs)
+  const outputs = found(definition, given)
+  return {
+    outputs,
+    working: printWorking(definition, definition.working(writeFormula, given, outputs), given, outputs),
+    cautions: [...definition.cautions(given, outputs), ...unusualValues(definition, given)].sort(
+      (a, b) => worstFirst[a.level] - worstFirst[b.level],
+    ),
+  }
+}

@@ -1,0 +1,191 @@
+import type { CalculatorDefinition, Cell, Inputs, Outputs, PlainRow } from './definition.ts'
+import { CalculationError } from './errors.ts'
+import { normalPair, seededRandom } from './numeric/random.ts'
+import { calculate, calculator } from './solve.ts'
+
+/** Standard uncertainties by field: `flow`, `sections[0].length`, `nozzles.diameter`. SI. */
+export type StandardUncertainties = Readonly<Record<string, number>>
+
+interface Field {
+  name: string
+  key: string
+  index?: number
+  column?: string
+  cell: Extract<Cell, { kind: 'scalar' }>
+  value: number
+  uncertainty: number
+}
+
+const pattern = /^([A-Za-z]\w*)(?:\[(\d+)\])?(?:\.([A-Za-z]\w*))?$/
+
+const findField = (definition: CalculatorDefinition, inputs: Inputs, name: string, uncertainty: number): Field => {
+  const unknown = () => new CalculationError('unknown-key', name, `${definition.title} has no number called “${name}”.`)
+  const [, key = '', index, column] = pattern.exec(name) ?? []
+  const input = Object.hasOwn(definition.inputs, key) ? definition.inputs[key]! : undefined
+  if (!input) throw unknown()
+  const cell =
+    input.kind === 'rows' || input.kind === 'group'
+      ? column !== undefined && Object.hasOwn(input.columns, column)
+        ? input.columns[column]
+        : undefined
+      : input
+  if (cell?.kind !== 'scalar' || (input.kind === 'rows') !== (index !== undefined)) throw unknown()
+  if (!(uncertainty >= 0) || !Number.isFinite(uncertainty))
+    throw new CalculationError('not-finite', name, `${cell.label}: give a standard uncertainty that is not negative.`)
+  const field: Omit<Field, 'value'> = {
+    name,
+    key,
+    ...(index === undefined ? {} : { index: Number(index) }),
+    ...(column === undefined ? {} : { column }),
+    cell,
+    uncertainty,
+  }
+  const value = read(inputs, field) ?? cell.fallback
+  if (typeof value !== 'number')
+    throw new CalculationError('missing', name, `${cell.label} is not given, so it can have no uncertainty.`)
+  return { ...field, value }
+}
+
+const read = (inputs: Inputs, { key, index, column }: Omit<Field, 'value'>): unknown => {
+  const value = inputs[key]
+  if (column === undefined) return value
+  const row = index === undefined ? (value as PlainRow) : (value as readonly PlainRow[])[index]
+  return row?.[column]
+}
+
+const replace = (inputs: Inputs, { key, index, column }: Field, value: number): Inputs => {
+  if (column === undefined) return { ...inputs, [key]: value }
+  if (index === undefined) return { ...inputs, [key]: { ...(inputs[key] as PlainRow), [column]: value } }
+  return {
+    ...inputs,
+    [key]: (inputs[key] as readonly PlainRow[]).map((row, i) => (i === index ? { ...row, [column]: value } : row)),
+  }
+}
+
+const findFields = (id: string, inputs: Inputs, uncertainties: StandardUncertainties): Field[] =>
+  Object.entries(uncertainties).map(([name, uncertainty]) => findField(calculator(id), inputs, name, uncertainty))
+
+const scalarKeys = (outputs: Outputs): string[] =>
+  Object.keys(outputs).filter((key) => typeof outputs[key] === 'number')
+
+/** Small against what matters, large against the roots' tolerance. */
+const relativeStep = 1e-4
+
+/** How much each scalar output changes with one field: a central difference, one-sided at the end of a range. */
+const sensitivities = (id: string, inputs: Inputs, field: Field, keys: readonly string[]): Map<string, number> => {
+  const [low, high] = field.cell.range
+  const step = relativeStep * Math.max(Math.abs(field.value), field.uncertainty)
+  const below = Math.max(low, field.value - step)
+  const above = Math.min(high, field.value + step)
+  const at = (value: number) => calculate(id, replace(inputs, field, value))
+  const [one, two] = [at(below), at(above)]
+  return new Map(
+    keys.flatMap((key) => {
+      const [a, b] = [one[key], two[key]]
+      return typeof a === 'number' && typeof b === 'number' ? [[key, (b - a) / (above - below)] as const] : []
+    }),
+  )
+}
+
+export interface UncertainOutput {
+  value: number
+  standardUncertainty: number
+  /** Each field's part of the variance, 0–1; they sum to 1 unless the uncertainty is 0. */
+  shares: Record<string, number>
+}
+
+/**
+ * Combined standard uncertainty of each scalar output by the law of propagation of uncertainty for independent inputs
+ * (JCGM 100:2008, 5.1.2), with numerical sensitivities. Throws `CalculationError` for bad inputs or unknown fields.
+ */
+export const withUncertainty = (
+  id: string,
+  inputs: Inputs,
+  standardUncertainties: StandardUncertainties,
+): { outputs: Record<string, UncertainOutput> } => {
+  const outputs = calculate(id, inputs)
+  const keys = scalarKeys(outputs)
+  const parts = findFields(id, inputs, standardUncertainties)
+    .filter((field) => field.uncertainty > 0)
+    .map((field) => ({ field, slopes: sensitivities(id, inputs, field, keys) }))
+  return {
+    outputs: Object.fromEntries(
+      keys.map((key) => {
+        const variances = parts.map(
+          ({ field, slopes }) => [field.name, ((slopes.get(key) ?? 0) * field.uncertainty) ** 2] as const,
+        )
+        const variance = variances.reduce((sum, [, part]) => sum + part, 0)
+        return [
+          key,
+          {
+            value: outputs[key] as number,
+            standardUncertainty: Math.sqrt(variance),
+            shares: Object.fromEntries(variances.map(([name, part]) => [name, variance === 0 ? 0 : part / variance])),
+          },
+        ]
+      }),
+    ),
+  }
+}
+
+export interface SampledOutput {
+  mean: number
+  standardUncertainty: number
+  /** Probabilistically symmetric (JCGM 101:2008, 7.7). */
+  interval95: [number, number]
+}
+
+/**
+ * Propagation of distributions by Monte Carlo (JCGM 101:2008): every field normal about its value. Draws that the calculator refuses, or
+ * that lie outside a range, are drawn again and counted in `redrawn`. The same seed gives the same result.
+ */
+export const monteCarlo = (
+  id: string,
+  inputs: Inputs,
+  standardUncertainties: StandardUncertainties,
+  { trials, seed }: { trials: number; seed: string | number },
+): { outputs: Record<string, SampledOutput>; redrawn: number } => {
+  const keys = scalarKeys(calculate(id, inputs))
+  const fields = findFields(id, inputs, standardUncertainties)
+  const random = seededRandom(String(seed))
+  const samples = new Map(keys.map((key) => [key, [] as number[]]))
+  const mostRedraws = 100 * trials
+  let redrawn = 0
+  for (let trial = 0; trial < trials;) {
+    let drawn = inputs
+    for (const field of fields) drawn = replace(drawn, field, field.value + field.uncertainty * normalPair(random)[0])
+    let outputs: Outputs
+    try {
+      outputs = calculate(id, drawn)
+    } catch (error) {
+      if (!(error instanceof CalculationError)) throw error
+      if (++redrawn > mostRedraws)
+        throw new CalculationError(
+          'no-solution',
+          fields[0]?.name ?? keys[0]!,
+          'Nearly all draws lie outside what can be worked out.',
+        )
+      continue
+    }
+    for (const key of keys) {
+      const value = outputs[key]
+      if (typeof value === 'number') samples.get(key)!.push(value)
+    }
+    trial++
+  }
+  return {
+    outputs: Object.fromEntries(
+      [...samples].filter(([, values]) => values.length > 1).map(([key, values]) => [key, summary(values)]),
+    ),
+    redrawn,
+  }
+}
+
+const summary = (values: number[]): SampledOutput => {
+  const n = values.length
+  const mean = values.reduce((sum, value) => sum + value, 0) / n
+  const variance = values.reduce((sum, value) => sum + (value - mean) ** 2, 0) / (n - 1)
+  const sorted = values.toSorted((a, b) => a - b)
+  const at = (share: number) => sorted[Math.min(n - 1, Math.max(0, Math.round(share * n) - 1))]!
+  return { mean, standardUncertainty: Math.sqrt(variance), interval95: [at(0.025), at(0.975)] }
+}
