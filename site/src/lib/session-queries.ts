@@ -1,0 +1,40 @@
+import { mutationOptions, queryOptions, useQuery, useQueryClient } from '@tanstack/react-query'
+import type { Session } from '#api/auth/dto/auth.schema.ts'
+import { userSchema } from '#api/users/dto/user.schema.ts'
+import { apiClient, nothing } from './api-client.ts'
+import { hasCode } from './api-error.ts'
+
+export const sessionQueries = {
+  /** The person signed in; null when nobody is. */
+  me: () =>
+    queryOptions({
+      queryKey: ['me'],
+      queryFn: () =>
+        apiClient.get('/api/users/me', userSchema).catch((error: unknown) => {
+          if (hasCode(error, 'not-signed-in')) return null
+          throw error
+        }),
+    }),
+}
+
+export const useMe = () => useQuery(sessionQueries.me())
+
+/** After sign-in everything that was read as a stranger is read again. */
+export function useTakeSession() {
+  const queryClient = useQueryClient()
+  return async ({ user }: Session) => {
+    queryClient.setQueryData(sessionQueries.me().queryKey, user)
+    await queryClient.invalidateQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'me' })
+  }
+}
+
+export function useSignOutOptions() {
+  const queryClient = useQueryClient()
+  return mutationOptions({
+    mutationFn: () => apiClient.delete('/api/auth/session', nothing),
+    onSuccess: async () => {
+      queryClient.setQueryData(sessionQueries.me().queryKey, null)
+      await queryClient.resetQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'me' })
+    },
+  })
+}

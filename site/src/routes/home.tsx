@@ -1,0 +1,9 @@
+import { Notice } from '../components/Notice.tsx'
+
+export function Component() {
+  return (
+    <Notice title="Lesson">
+      <p>This page is not open yet.</p>
+    </Notice>
+  )
+}

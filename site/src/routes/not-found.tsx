@@ -1,0 +1,1 @@
+export { NotFound as Component } from '../components/RouteError.tsx'

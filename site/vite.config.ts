@@ -1,0 +1,59 @@
+import { fileURLToPath } from 'node:url'
+import mdx from '@mdx-js/rollup'
+import react from '@vitejs/plugin-react'
+import rehypeKatex from 'rehype-katex'
+import remarkFrontmatter from 'remark-frontmatter'
+import remarkGfm from 'remark-gfm'
+import remarkMath from 'remark-math'
+import remarkMdxFrontmatter from 'remark-mdx-frontmatter'
+import { defineConfig } from 'vite'
+import { lessonIndex } from './scripts/lesson-index.ts'
+
+const folder = (path: string) => fileURLToPath(new URL(path, import.meta.url))
+const server = { target: 'http://localhost:4310', changeOrigin: false }
+
+/** `content/<course>/<nn>-<lesson>.mdx` → `lessons/<course>/<lesson>`: the address that the server guards. */
+function lessonChunk(module: string | null) {
+  const [, course, lesson] = module?.match(/\/content\/([a-z-]+)\/\d+-([a-z-]+)\.mdx$/) ?? []
+  return lesson && `lessons/${course}/${lesson}-[hash].js`
+}
+
+/** The arithmetic and its units, which no page needs before its first paint. */
+const isCalculation = (module: string) =>
+  module.startsWith(folder('../calc/')) || module.includes('/node_modules/mathjs/')
+
+export default defineConfig(({ isSsrBuild }) => ({
+  plugins: [
+    lessonIndex(folder('../content')),
+    {
+      enforce: 'pre',
+      ...mdx({
+        include: [/\/content\/.*\.mdx$/],
+        remarkPlugins: [remarkFrontmatter, remarkMdxFrontmatter, remarkGfm, remarkMath],
+        rehypePlugins: [rehypeKatex],
+      }),
+    },
+    react(),
+  ],
+  build: {
+    outDir: folder(isSsrBuild ? '../dist/site-server' : '../dist/site'),
+    emptyOutDir: true,
+    copyPublicDir: !isSsrBuild,
+    sourcemap: true,
+    // One style sheet: a page rendered at build time then needs no list of its lazy parts' styles.
+    cssCodeSplit: false,
+    rolldownOptions: {
+      input: folder(isSsrBuild ? 'src/entry-server.tsx' : 'index.html'),
+      output: isSsrBuild
+        ? { entryFileNames: 'entry-server.js' }
+        : {
+            chunkFileNames: (chunk) => lessonChunk(chunk.facadeModuleId) ?? 'assets/[name]-[hash].js',
+            codeSplitting: { groups: [{ name: 'calculators', test: isCalculation }] },
+          },
+    },
+  },
+  // Bundled, so that the build-time rendering resolves every package as the browser's bundle does.
+  ssr: { noExternal: true },
+  server: { fs: { allow: [folder('..')] }, proxy: { '/api': server, '/lessons': server } },
+  preview: { proxy: { '/api': server } },
+}))
