@@ -52,7 +52,7 @@ export default tseslint.config(
       never('^#(content|api|site)/', 'calc stands alone.'),
       never('^(?!\\.|#calc/|mathjs$)', 'calc imports nothing outside itself but mathjs.'),
     ],
-    ['calc/**/*.test.ts', 'calc/bench/**'],
+    ['calc/**/*.test.ts', 'calc/testing/**', 'calc/bench/**'],
   ),
   boundary(['content/**/*.ts'], [crossesFolders, never('^#(api|site)/', 'content knows only calc.')]),
   boundary(['api/**/*.ts'], [crossesFolders, never('^#site/', 'the server does not know the site.')]),
