@@ -13,7 +13,7 @@ interface Count {
 }
 
 const deep = process.argv.includes('--deep')
-const env = { ...process.env, ...(deep ? { DEEP: '1' } : {}), FORCE_COLOR: '0', NO_COLOR: '1' }
+const env: NodeJS.ProcessEnv = { ...process.env, ...(deep ? { DEEP: '1' } : {}), FORCE_COLOR: '0', NO_COLOR: '1' }
 const reports = '.cache/reports'
 rmSync(reports, { recursive: true, force: true })
 mkdirSync(reports, { recursive: true })
