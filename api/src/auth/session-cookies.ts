@@ -1,0 +1,49 @@
+import { Injectable } from '@nestjs/common'
+import { ConfigService } from '@nestjs/config'
+import type { CookieOptions, Request, Response } from 'express'
+import type { Environment } from '../config/environment.ts'
+import { accessSeconds, type SessionTokens, sessionSeconds } from './sessions.service.ts'
+
+const accessCookie = { name: 'leatwright_access', path: '/' }
+/** Sent only where it is used: refresh and sign-out. */
+const refreshCookie = { name: 'leatwright_refresh', path: '/api/auth/session' }
+
+@Injectable()
+export class SessionCookies {
+  private readonly options: CookieOptions
+
+  constructor(config: ConfigService<Environment, true>) {
+    const secure = config.get('PUBLIC_URL', { infer: true }).startsWith('https:')
+    this.options = { httpOnly: true, sameSite: 'lax', secure }
+  }
+
+  set(response: Response, tokens: SessionTokens) {
+    const { options } = this
+    response.cookie(accessCookie.name, tokens.access, {
+      ...options,
+      path: accessCookie.path,
+      maxAge: accessSeconds * 1000,
+    })
+    response.cookie(refreshCookie.name, tokens.refresh, {
+      ...options,
+      path: refreshCookie.path,
+      maxAge: sessionSeconds * 1000,
+    })
+  }
+
+  clear(response: Response) {
+    for (const { name, path } of [accessCookie, refreshCookie]) response.clearCookie(name, { ...this.options, path })
+  }
+
+  areSent(request: Request): boolean {
+    return this.accessToken(request) !== undefined || this.refreshToken(request) !== undefined
+  }
+
+  accessToken = (request: Request) => read(request, accessCookie.name)
+  refreshToken = (request: Request) => read(request, refreshCookie.name)
+}
+
+function read(request: Request, name: string): string | undefined {
+  const value = (request.cookies as Record<string, unknown>)[name]
+  return typeof value === 'string' ? value : undefined
+}

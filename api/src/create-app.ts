@@ -1,0 +1,51 @@
+import path from 'node:path'
+import { type LogLevel, RequestMethod } from '@nestjs/common'
+import { NestFactory } from '@nestjs/core'
+import type { NestExpressApplication } from '@nestjs/platform-express'
+import cookieParser from 'cookie-parser'
+import helmet from 'helmet'
+import { AppModule } from './app.module.ts'
+import type { Environment } from './config/environment.ts'
+import type { DatabaseConnection } from './database/connection.ts'
+import { serveOpenApi } from './open-api.ts'
+import { projectRoot } from './project-root.ts'
+import { siteFiles } from './site-files/site-files.ts'
+
+/** The whole application, ready to listen; the server and the tests make it alike. */
+export async function createApp(
+  environment: Environment,
+  connection: DatabaseConnection,
+  logger: LogLevel[] = ['log', 'warn', 'error', 'fatal'],
+): Promise<NestExpressApplication> {
+  const app = await NestFactory.create<NestExpressApplication>(AppModule.forRoot(environment, connection), {
+    // Only JSON is read: no form of another site can send that.
+    bodyParser: false,
+    rawBody: true,
+    logger,
+    abortOnError: false,
+  })
+  app.set('trust proxy', 'loopback')
+  app.disable('x-powered-by')
+  app.use(helmet({ contentSecurityPolicy: { useDefaults: false, directives: contentPolicy }, hsts: false }))
+  app.use(cookieParser())
+  app.useBodyParser('json', { limit: '256kb' })
+  app.use(siteFiles(path.join(projectRoot, 'dist/site')))
+  app.setGlobalPrefix('api', { exclude: [{ path: 'lessons/:course/:file', method: RequestMethod.GET }] })
+  serveOpenApi(app)
+  await app.init()
+  return app
+}
+
+/** Everything comes from this server. Style elements may stand in the page (the component library makes some); scripts never. */
+const contentPolicy = {
+  defaultSrc: ["'self'"],
+  scriptSrc: ["'self'"],
+  styleSrc: ["'self'", "'unsafe-inline'"],
+  imgSrc: ["'self'", 'data:'],
+  connectSrc: ["'self'"],
+  fontSrc: ["'self'"],
+  objectSrc: ["'none'"],
+  baseUri: ["'self'"],
+  formAction: ["'self'"],
+  frameAncestors: ["'none'"],
+}
