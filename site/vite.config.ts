@@ -8,6 +8,7 @@ import remarkMath from 'remark-math'
 import remarkMdxFrontmatter from 'remark-mdx-frontmatter'
 import { defineConfig } from 'vite'
 import { lessonIndex } from './scripts/lesson-index.ts'
+import { remarkContents } from './src/mdx/remark-contents.ts'
 
 const folder = (path: string) => fileURLToPath(new URL(path, import.meta.url))
 const server = { target: 'http://localhost:4310', changeOrigin: false }
@@ -29,7 +30,7 @@ export default defineConfig(({ isSsrBuild }) => ({
       enforce: 'pre',
       ...mdx({
         include: [/\/content\/.*\.mdx$/],
-        remarkPlugins: [remarkFrontmatter, remarkMdxFrontmatter, remarkGfm, remarkMath],
+        remarkPlugins: [remarkFrontmatter, remarkContents, remarkMdxFrontmatter, remarkGfm, remarkMath],
         rehypePlugins: [rehypeKatex],
       }),
     },

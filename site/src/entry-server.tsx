@@ -17,7 +17,11 @@ export async function render(path: string) {
   return renderToString(
     <StrictMode>
       <App queryClient={createQueryClient()}>
-        <StaticRouterProvider router={createStaticRouter(handler.dataRoutes, context)} context={context} hydrate={false} />
+        <StaticRouterProvider
+          router={createStaticRouter(handler.dataRoutes, context)}
+          context={context}
+          hydrate={false}
+        />
       </App>
     </StrictMode>,
   )
