@@ -1,6 +1,7 @@
 import { type DynamicModule, Module } from '@nestjs/common'
 import { ScheduleModule } from '@nestjs/schedule'
 import { AuthModule } from './auth/auth.module.ts'
+import { CalculatorsModule } from './calculators/calculators.module.ts'
 import { CommonModule } from './common/common.module.ts'
 import { AppConfigModule } from './config/config.module.ts'
 import type { Environment } from './config/environment.ts'
@@ -22,6 +23,7 @@ export class AppModule {
         CommonModule,
         AuthModule,
         UsersModule,
+        CalculatorsModule,
         HealthModule,
         SiteFilesModule,
       ],

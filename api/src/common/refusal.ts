@@ -14,7 +14,15 @@ const statuses = {
   conflict: 409,
   'link-spent': 410,
   'too-large': 413,
+  'payment-needed': 402,
   invalid: 422,
+  // Those of a calculation, as `calc/` names them.
+  missing: 422,
+  'unknown-key': 422,
+  'not-finite': 422,
+  'out-of-range': 422,
+  inconsistent: 422,
+  'no-solution': 422,
   'too-many': 429,
   broken: 500,
 } as const

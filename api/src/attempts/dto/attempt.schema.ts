@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { printedStepSchema } from '../../common/dto/printed-step.schema.ts'
 
 /** A number field of a question: what is asked for and the units that are offered (any unit of the quantity is taken). */
 const numberField = {
@@ -59,15 +60,6 @@ export const answerSchema = z.discriminatedUnion('kind', [
   z.object({ kind: z.literal('match'), pairs: z.record(id, id) }),
 ])
 export type Answer = z.infer<typeof answerSchema>
-
-/** A step of the working, printed with this draw's numbers: formulas as TeX, and as speech. */
-export const printedStepSchema = z.object({
-  say: z.string(),
-  symbols: z.string().optional(),
-  numbers: z.string().optional(),
-  speech: z.string().optional(),
-  gives: z.string().optional(),
-})
 
 export const partResultSchema = z.object({
   /** The part's id; a question of one part has the one id "answer". */
