@@ -1,23 +1,19 @@
 import path from 'node:path'
-import { type LogLevel, RequestMethod } from '@nestjs/common'
+import { type DynamicModule, type LogLevel, RequestMethod } from '@nestjs/common'
 import { NestFactory } from '@nestjs/core'
 import type { NestExpressApplication } from '@nestjs/platform-express'
 import cookieParser from 'cookie-parser'
 import helmet from 'helmet'
-import { AppModule } from './app.module.ts'
-import type { Environment } from './config/environment.ts'
-import type { DatabaseConnection } from './database/connection.ts'
 import { serveOpenApi } from './open-api.ts'
 import { projectRoot } from './project-root.ts'
 import { siteFiles } from './site-files/site-files.ts'
 
-/** The whole application, ready to listen; the server and the tests make it alike. */
+/** The application of `AppModule`, ready to listen; the server and the tests make it alike. */
 export async function createApp(
-  environment: Environment,
-  connection: DatabaseConnection,
+  module: DynamicModule,
   logger: LogLevel[] = ['log', 'warn', 'error', 'fatal'],
 ): Promise<NestExpressApplication> {
-  const app = await NestFactory.create<NestExpressApplication>(AppModule.forRoot(environment, connection), {
+  const app = await NestFactory.create<NestExpressApplication>(module, {
     // Only JSON is read: no form of another site can send that.
     bodyParser: false,
     rawBody: true,

@@ -1,4 +1,5 @@
 import 'reflect-metadata'
+import { AppModule } from './app.module.ts'
 import { ConfigurationError, readEnvironment } from './config/environment.ts'
 import { createApp } from './create-app.ts'
 import { openDatabase } from './database/connection.ts'
@@ -7,7 +8,7 @@ import { FolderInUseError } from './database/folder-lock.ts'
 async function start() {
   const environment = readEnvironment(process.env)
   const connection = await openDatabase(environment)
-  const app = await createApp(environment, connection)
+  const app = await createApp(AppModule.forRoot(environment, connection))
 
   let isStopping = false
   const stop = () => {

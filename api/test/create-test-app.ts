@@ -3,9 +3,11 @@ import { existsSync, openAsBlob, readdirSync, readFileSync } from 'node:fs'
 import { mkdir, rename, writeFile } from 'node:fs/promises'
 import path from 'node:path'
 import { PGlite } from '@electric-sql/pglite'
+import type { Type } from '@nestjs/common'
 import type { NestExpressApplication } from '@nestjs/platform-express'
 import { desc, eq } from 'drizzle-orm'
 import request from 'supertest'
+import { AppModule } from '#api/app.module.ts'
 import { antiForgeryHeader } from '#api/common/guards/access.guard.ts'
 import { readEnvironment } from '#api/config/environment.ts'
 import { createApp } from '#api/create-app.ts'
@@ -37,7 +39,10 @@ export interface TestApp {
 const noMailServer = 'smtp://127.0.0.1:9'
 
 /** The whole application on an in-memory database with the shipped migrations, the courses and the demo accounts. */
-export async function createTestApp(settings: Readonly<Record<string, string>> = {}): Promise<TestApp> {
+export async function createTestApp(
+  settings: Readonly<Record<string, string>> = {},
+  controllers: Type[] = [],
+): Promise<TestApp> {
   const environment = readEnvironment({
     NODE_ENV: 'test',
     SMTP_URL: noMailServer,
@@ -46,7 +51,7 @@ export async function createTestApp(settings: Readonly<Record<string, string>> =
     ...settings,
   })
   const connection = await openTestDatabase()
-  const app = await createApp(environment, connection, [])
+  const app = await createApp({ ...AppModule.forRoot(environment, connection), controllers }, [])
   const { database } = connection
   let learners = 0
 
