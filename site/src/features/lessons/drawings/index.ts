@@ -1,0 +1,9 @@
+import { lazy, type ComponentType } from 'react'
+
+/** The drawings that lessons call for by name. */
+export const drawings: Record<string, ComponentType> = {
+  'fall-to-the-jet': lazy(async () => ({ default: (await import('./FallToTheJet.tsx')).FallToTheJet })),
+  'power-chain': lazy(async () => ({ default: (await import('./PowerChain.tsx')).PowerChain })),
+  'grade-line-falls': lazy(async () => ({ default: (await import('./GradeLineFalls.tsx')).GradeLineFalls })),
+  'outside-and-inside': lazy(async () => ({ default: (await import('./OutsideAndInside.tsx')).OutsideAndInside })),
+}
