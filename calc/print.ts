@@ -1,5 +1,5 @@
 import type { CalculatorDefinition, Inputs, Outputs, Quantity, Step } from './definition.ts'
-import { fill, speak, spoken, type Aside } from './formula.ts'
+import { fill, speak, spoken, type Aside, type Formula } from './formula.ts'
 import { conversion, quantities } from './units/quantities.ts'
 import { formatNumber, unitFor } from './units/format.ts'
 
@@ -43,9 +43,10 @@ const texNumber = (value: number, digits: number): string => {
 const putIn = (value: number, digits = digitsPutIn): string => {
   const short = Number(value.toPrecision(digits))
   const exact = String(Math.abs(short))
+  const figures = short.toExponential().split('e')[0]!.replace(/\D/g, '').length
   const tex =
     /e/.test(exact) || Math.abs(short) >= 10_000 || (short !== 0 && Math.abs(short) < 1e-4)
-      ? texNumber(value, digits)
+      ? texNumber(short, figures)
       : exact
   return value < 0 || tex.includes('times') ? `(${value < 0 ? '-' : ''}${tex.replace('-', value < 0 ? '' : '-')})` : tex
 }
@@ -67,8 +68,14 @@ const result = (value: number, quantity: Quantity, digits: number, unit?: string
     : `${inSi} = ${texNumber(conversion(quantity, natural)!.fromSi(value), digits)}${texUnit(natural.name)}`
 }
 
-/** `\,` stands for an unwritten "times": a thin space between symbols, a sign between numbers. */
-const timesBetweenNumbers = (tex: string): string => tex.replace(/\\,/g, '\\times ')
+/**
+ * `\,` stands for an unwritten "times": a thin space between symbols, a sign between numbers. Only the formula's own: a number put in
+ * groups its thousands by the same space.
+ */
+const timesBetweenNumbers = (formula: Formula): Formula => ({
+  parts: formula.parts.map((part) => part.replace(/\\,/g, '\\times ')),
+  holes: formula.holes,
+})
 
 /** Prints a calculator's working for one calculation. */
 export const printWorking = (
@@ -98,7 +105,7 @@ export const printWorking = (
     return {
       say,
       symbols: fill(formula, symbol),
-      numbers: timesBetweenNumbers(fill(formula, number)) + end,
+      numbers: fill(timesBetweenNumbers(formula), number) + end,
       speech: speak(fill(formula, word)),
       ...(gives === undefined ? {} : { gives }),
     }

@@ -22,15 +22,23 @@ export const waterDynamicViscosity = (celsius: number): number => {
 export const waterKinematicViscosity = (celsius: number): number =>
   waterDynamicViscosity(celsius) / waterDensity(celsius)
 
+/** The terms of the quadratic behind the saturation pressure (IAPWS-IF97, region 4, eq. (30), table 34). */
+export const saturationTerms = (celsius: number): { theta: number; a: number; b: number; c: number } => {
+  const T = kelvin(celsius)
+  const theta = T - 0.23855557567849 / (T - 650.17534844798)
+  return {
+    theta,
+    a: theta ** 2 + 1167.0521452767 * theta - 724213.16703206,
+    b: -17.073846940092 * theta ** 2 + 12020.82470247 * theta - 3232555.0322333,
+    c: 14.91510861353 * theta ** 2 - 4823.2657361591 * theta + 405113.40542057,
+  }
+}
+
 /**
  * Pressure at which water boils at this temperature, Pa, from 273.15 to 647.096 K: IAPWS R7-97(2012), Revised Release on the IAPWS
- * Industrial Formulation 1997, region 4, eq. (30), table 34.
+ * Industrial Formulation 1997, region 4.
  */
 export const vapourPressure = (celsius: number): number => {
-  const T = kelvin(celsius)
-  const theta = T - 0.23855557567849 / (T - 0.65017534844798e3)
-  const a = theta ** 2 + 0.11670521452767e4 * theta - 0.72421316703206e6
-  const b = -0.17073846940092e2 * theta ** 2 + 0.1202082470247e5 * theta - 0.32325550322333e7
-  const c = 0.1491510861353e2 * theta ** 2 - 0.48232657361591e4 * theta + 0.40511340542057e6
+  const { a, b, c } = saturationTerms(celsius)
   return 1e6 * ((2 * c) / (-b + Math.sqrt(b ** 2 - 4 * a * c))) ** 4
 }
