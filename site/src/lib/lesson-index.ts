@@ -1,3 +1,5 @@
+import type { Hazard } from '#calc/definition.ts'
+
 /** What is public of every lesson that is there, paid ones too. Read at build from the lessons' frontmatter. */
 export interface LessonIndexEntry {
   course: string
@@ -6,5 +8,5 @@ export interface LessonIndexEntry {
   title: string
   minutes: number
   station: string
-  hazards: readonly string[]
+  hazards: readonly Hazard[]
 }

@@ -1,0 +1,72 @@
+import { useQuery } from '@tanstack/react-query'
+import type { ReactNode } from 'react'
+import { Link } from 'react-router-dom'
+import { StaffGauge } from '../../components/StaffGauge.tsx'
+import { courseQueries } from '../../lib/course-queries.ts'
+import type { CourseOutline, LessonOutline } from '../../lib/course-structure.ts'
+import { hazardWords } from '../../lib/hazard-words.ts'
+import type { ContentsEntry } from '../../mdx/remark-contents.ts'
+import { LessonNeighbours } from './LessonNeighbours.tsx'
+import './lesson.css'
+
+interface LessonPageProps {
+  course: CourseOutline
+  lesson: LessonOutline
+  /** Absent until the lesson's text is there. */
+  contents: readonly ContentsEntry[] | undefined
+  children: ReactNode
+}
+
+const listed = new Intl.ListFormat('en-GB')
+
+/** What stands around a lesson's text. */
+export function LessonPage({ course, lesson, contents, children }: LessonPageProps) {
+  const progress = useQuery(courseQueries.detail(course.slug)).data?.lessons ?? []
+  const isDone = progress.some(({ slug, done }) => slug === lesson.slug && done)
+  return (
+    <div className="page lesson">
+      <div className="lesson-progress">
+        <StaffGauge done={progress.filter(({ done }) => done).length} of={course.lessons.length} />
+      </div>
+      <article className="lesson-article">
+        <header className="lesson-head">
+          <div>
+            <p className="kicker">
+              <Link to={`/courses/${course.slug}`}>
+                {course.number} · {course.title}
+              </Link>{' '}
+              — lesson {lesson.number}
+              {lesson.minutes !== undefined && ` · ${lesson.minutes} minutes`}
+              {isDone && <strong className="lesson-done"> · ✓ Done</strong>}
+            </p>
+            <h1>{lesson.title}</h1>
+            {lesson.hazards.length > 0 && (
+              <p className="lesson-hazards">
+                <strong>Touches on danger:</strong> {listed.format(lesson.hazards.map((hazard) => hazardWords[hazard]))}
+                .
+              </p>
+            )}
+          </div>
+          {contents && contents.length > 0 && <LessonContents contents={contents} />}
+        </header>
+        {children}
+        <LessonNeighbours course={course} lesson={lesson} />
+      </article>
+    </div>
+  )
+}
+
+function LessonContents({ contents }: { contents: readonly ContentsEntry[] }) {
+  return (
+    <nav className="lesson-contents" aria-labelledby="lesson-contents-title">
+      <h2 id="lesson-contents-title">In this lesson</h2>
+      <ol>
+        {contents.map(({ id, title }) => (
+          <li key={id}>
+            <a href={`#${id}`}>{title}</a>
+          </li>
+        ))}
+      </ol>
+    </nav>
+  )
+}

@@ -1,0 +1,28 @@
+import type { ReactNode } from 'react'
+import type { Caution } from '#calc/index.ts'
+import { Working } from '../components/Working.tsx'
+import { Results } from '../features/calculators/Results.tsx'
+import type { Attributes } from './attributes.ts'
+import { ExampleFrame } from './ExampleFrame.tsx'
+import { workOut } from './example.ts'
+
+interface WorkedExampleProps {
+  id: string
+  children?: ReactNode
+  [input: string]: Attributes[string] | ReactNode
+}
+
+/** The live calculator beside it shows the cautions. */
+const none: ReadonlyMap<string, readonly Caution[]> = new Map()
+
+/** The whole working of a calculator for the numbers that the lesson gives. */
+export default function WorkedExample({ id, children, ...attributes }: WorkedExampleProps) {
+  const { definition, given, working, outputs } = workOut(id, attributes as Attributes, children)
+  const keys = [...new Set(working.flatMap(({ gives }) => gives ?? []))]
+  return (
+    <ExampleFrame kind="Worked example" title={definition.title} given={given}>
+      <Working steps={working} />
+      <Results definition={definition} outputs={outputs} keys={keys} cautions={none} />
+    </ExampleFrame>
+  )
+}

@@ -1,0 +1,54 @@
+import type { ReactNode } from 'react'
+import { calculator, type CalculatorDefinition } from '#calc/index.ts'
+import { shownKeys, solveForm, startForm, type FieldText, type Form } from '../features/calculators/form.ts'
+import { textsFrom, type Attributes } from './attributes.ts'
+
+export interface GivenValue {
+  label: string
+  text: string
+}
+
+const written = ({ text, unit }: FieldText) => [text, unit].filter(Boolean).join('\u00a0')
+
+const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1)
+
+/** The values that a calculation starts from: those the lesson names, and those it cannot do without. */
+function givenValues(definition: CalculatorDefinition, form: Form, isNamed: (path: string) => boolean): GivenValue[] {
+  return shownKeys(definition, form).flatMap((key) => {
+    const input = definition.inputs[key]!
+    const value = (cell: typeof input & { kind: 'scalar' | 'choice' }, path: string, field: FieldText, of = '') => {
+      if (field.text === '' || (cell.optional && !isNamed(path))) return []
+      const text =
+        cell.kind === 'choice' ? (cell.words?.[field.text] ?? field.text.replaceAll('-', ' ')) : written(field)
+      return [{ label: of + cell.label, text }]
+    }
+    if (input.kind === 'scalar' || input.kind === 'choice') return value(input, key, form.fields[key]!)
+    return form.rows[key]!.flatMap((row, i) =>
+      Object.entries(input.columns).flatMap(([name, cell]) =>
+        input.kind === 'group'
+          ? value(cell, `${key}.${name}`, row[name]!)
+          : value(cell, `${key}.${i}.${name}`, row[name]!, `${capital(input.row)} ${i + 1}: `),
+      ),
+    )
+  })
+}
+
+/** A calculation with the numbers of a lesson, worked out; throws where they do not work out, which the content's tests find. */
+export function workOut(id: string, attributes: Attributes, children: ReactNode) {
+  const definition = calculator(id)
+  const texts = textsFrom(definition, attributes, children)
+  const form = startForm(definition, texts)
+  const solved = solveForm(definition, form)
+  if (!solved.solution) {
+    const [path, message] = Object.entries(solved.errors)[0]!
+    throw new Error(`The example of ${definition.title} does not work out: ${path}: ${message}`)
+  }
+  const { outputs, working } = solved.solution
+  return {
+    definition,
+    inputs: solved.inputs,
+    given: givenValues(definition, form, (path) => path in texts),
+    working,
+    outputs,
+  }
+}
