@@ -1,6 +1,10 @@
 import type { CalculatorDefinition } from './definition.ts'
 import { jet } from './jet/jet.ts'
+import { runner } from './jet/runner.ts'
+import { fittings } from './pipe/fittings.ts'
 import { friction } from './pipe/friction.ts'
+import { gaugeReading } from './pipe/gauge-reading.ts'
+import { penstock } from './pipe/penstock.ts'
 import { power } from './water/power.ts'
 import { water } from './water/water.ts'
 
@@ -9,7 +13,11 @@ export const calculators = {
   water,
   power,
   friction,
+  fittings,
+  penstock,
+  'gauge-reading': gaugeReading,
   jet,
+  runner,
 } as const satisfies Record<string, CalculatorDefinition>
 
 export type CalculatorId = keyof typeof calculators

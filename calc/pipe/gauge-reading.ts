@@ -133,7 +133,10 @@ export const gaugeReading = defineCalculator({
       ...(predictedFall === undefined || predictedFall === 0
         ? {}
         : { flowEstimate: flow! * Math.sqrt(pressureDrop / predictedFall) }),
-      findings: findingsFor(given, predictedFall === undefined ? undefined : predictedFall * weight),
+      findings: findingsFor(
+        given,
+        predictedLoss === undefined ? undefined : (predictedLoss + (velocityHead ?? 0)) * weight,
+      ),
     }
   },
   working(write, { insideDiameter, flow, waterTemperature }, { velocityHead, headLoss, lossFraction, flowEstimate }) {
@@ -204,7 +207,7 @@ export const gaugeReading = defineCalculator({
             {
               level: 'check' as const,
               about: ['pressureDrop' as const, 'flow' as const],
-              say: `Without a flow this fall of ${join(format(pressureDrop, 'head'))} is loss and velocity head together: give the predicted flow to part them.`,
+              say: `Without a flow this fall of ${join(format(pressureDrop, 'head'))} is loss and velocity head together, and all of it is judged as loss: give the predicted flow to part them.`,
             },
           ]
         : []),
