@@ -6,4 +6,6 @@ export const drawings: Record<string, ComponentType> = {
   'power-chain': lazy(async () => ({ default: (await import('./PowerChain.tsx')).PowerChain })),
   'grade-line-falls': lazy(async () => ({ default: (await import('./GradeLineFalls.tsx')).GradeLineFalls })),
   'outside-and-inside': lazy(async () => ({ default: (await import('./OutsideAndInside.tsx')).OutsideAndInside })),
+  'jet-thins-with-head': lazy(async () => ({ default: (await import('./JetThinsWithHead.tsx')).JetThinsWithHead })),
+  'jet-draws-in': lazy(async () => ({ default: (await import('./JetDrawsIn.tsx')).JetDrawsIn })),
 }
