@@ -5,6 +5,7 @@ import { fittings } from './pipe/fittings.ts'
 import { friction } from './pipe/friction.ts'
 import { gaugeReading } from './pipe/gauge-reading.ts'
 import { penstock } from './pipe/penstock.ts'
+import { flowByBucket } from './site/flow-by-bucket.ts'
 import { power } from './water/power.ts'
 import { water } from './water/water.ts'
 
@@ -12,6 +13,7 @@ import { water } from './water/water.ts'
 export const calculators = {
   water,
   power,
+  'flow-by-bucket': flowByBucket,
   friction,
   fittings,
   penstock,

@@ -1,17 +1,19 @@
-import type {
-  CalculatorDefinition,
-  Cell,
-  Columns,
-  Input,
-  Inputs,
-  InputValue,
-  PlainRow,
-  PlainValue,
+import {
+  numberOf,
+  type CalculatorDefinition,
+  type Cell,
+  type Columns,
+  type Input,
+  type Inputs,
+  type InputValue,
+  type PlainRow,
+  type PlainValue,
+  type Scalar,
 } from './definition.ts'
 import { CalculationError } from './errors.ts'
 import { say } from './units/format.ts'
 
-const between = (cell: Extract<Cell, { kind: 'scalar' }>): string =>
+const between = (cell: Scalar): string =>
   `between ${say(cell.range[0], cell.quantity, cell.unit)} and ${say(cell.range[1], cell.quantity, cell.unit)}`
 
 const checkCell = (cell: Cell, field: string, value: unknown): PlainValue => {
@@ -19,6 +21,10 @@ const checkCell = (cell: Cell, field: string, value: unknown): PlainValue => {
     if (typeof value === 'string' && cell.of.includes(value)) return value
     throw new CalculationError('out-of-range', field, `${cell.label}: choose one of ${cell.of.join(', ')}.`)
   }
+  return checkNumber(cell, field, value)
+}
+
+const checkNumber = (cell: Scalar, field: string, value: unknown): number => {
   if (typeof value !== 'number' || !Number.isFinite(value))
     throw new CalculationError('not-finite', field, `${cell.label}: give a number ${between(cell)}.`)
   if (value < cell.range[0] || value > cell.range[1])
@@ -54,22 +60,29 @@ const checkInput = (input: Input, key: string, value: unknown): InputValue => {
       return checkCell(input, key, value)
     case 'group':
       return checkColumns(input.columns, input.label, key, value)
-    case 'rows': {
-      if (!Array.isArray(value)) throw new CalculationError('not-finite', key, `${input.label}: give a list.`)
-      const rows: readonly unknown[] = value
-      if (rows.length < input.least)
-        throw new CalculationError(
-          rows.length === 0 ? 'missing' : 'out-of-range',
-          key,
-          `${input.label}: give at least ${input.least} ${input.row}${input.least === 1 ? '' : 's'}.`,
-        )
-      if (rows.length > input.most)
-        throw new CalculationError('out-of-range', key, `${input.label}: give at most ${input.most} ${input.row}s.`)
-      return rows.map((row, i) =>
+    case 'rows':
+      return checkList(input, key, value).map((row, i) =>
         checkColumns(input.columns, `${input.label}, ${input.row} ${i + 1}`, `${key}[${i}]`, row),
       )
-    }
+    case 'series':
+      return checkList(input, key, value).map((item, i) => checkNumber(numberOf(input, i), `${key}[${i}]`, item))
   }
+}
+
+const checkList = (
+  { label, row, least, most }: Extract<Input, { kind: 'rows' | 'series' }>,
+  key: string,
+  value: unknown,
+) => {
+  if (!Array.isArray(value)) throw new CalculationError('not-finite', key, `${label}: give a list.`)
+  if (value.length < least)
+    throw new CalculationError(
+      value.length === 0 ? 'missing' : 'out-of-range',
+      key,
+      `${label}: give at least ${least} ${row}${least === 1 ? '' : 's'}.`,
+    )
+  if (value.length > most) throw new CalculationError('out-of-range', key, `${label}: give at most ${most} ${row}s.`)
+  return value as readonly unknown[]
 }
 
 /**

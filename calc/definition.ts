@@ -4,6 +4,8 @@ import type { Formula, WriteFormula } from './formula.ts'
 export type Quantity =
   | 'head'
   | 'length'
+  | 'volume'
+  | 'time'
   | 'flow'
   | 'velocity'
   | 'power'
@@ -99,7 +101,27 @@ export type Rows = Said &
   }
 /** A few values that are given together, such as the nozzles that are open. */
 export type Group = Said & Absence & { kind: 'group'; columns: Columns; initial?: Record<string, number | string> }
-export type Input = Scalar | Choice | Rows | Group
+/** A list of numbers of one quantity, such as the timings of a bucket. */
+export type Series = Said &
+  Absence & {
+    kind: 'series'
+    /** What one number is called: "timing". */
+    row: string
+    quantity: Quantity
+    range: readonly [number, number]
+    usual?: readonly [number, number]
+    unit?: string
+    least: number
+    most: number
+    initial?: readonly number[]
+  }
+/** One number of a series, by its place from 0, as a scalar. */
+export const numberOf = ({ label, row, quantity, range, usual, unit }: Series, place: number): Scalar => ({
+  kind: 'scalar',
+  label: `${label}, ${row} ${place + 1}`,
+  ...{ quantity, range, usual, unit },
+})
+export type Input = Scalar | Choice | Rows | Group | Series
 
 interface ScalarOutput extends Said {
   kind: 'scalar'
@@ -135,11 +157,13 @@ type Record_<C> = Spread<
     [K in keyof C as MayMiss<C[K]> extends true ? K : never]?: CellValue<C[K]>
   }
 >
-type ValueOf<I> = I extends { kind: 'rows'; columns: infer C }
-  ? readonly Record_<C>[]
-  : I extends { kind: 'group'; columns: infer C }
-    ? Record_<C>
-    : CellValue<I>
+type ValueOf<I> = I extends { kind: 'series' }
+  ? readonly number[]
+  : I extends { kind: 'rows'; columns: infer C }
+    ? readonly Record_<C>[]
+    : I extends { kind: 'group'; columns: infer C }
+      ? Record_<C>
+      : CellValue<I>
 /** What `solve` is handed: checked, SI, fallbacks filled in. */
 export type Given<I> = Spread<
   { [K in keyof I as MayMiss<I[K]> extends true ? never : K]: ValueOf<I[K]> } & {
@@ -201,7 +225,7 @@ export const defineCalculator = <const I extends Record<string, Input>, const O 
 
 export type PlainValue = number | string
 export type PlainRow = Readonly<Record<string, PlainValue | undefined>>
-export type InputValue = PlainValue | PlainRow | readonly PlainRow[]
+export type InputValue = PlainValue | PlainRow | readonly PlainRow[] | readonly number[]
 export type Inputs = Readonly<Record<string, InputValue | undefined>>
 export type OutputValue = PlainValue | readonly PlainRow[]
 export type Outputs = Readonly<Record<string, OutputValue | undefined>>

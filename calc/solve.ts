@@ -1,14 +1,15 @@
 import { calculators, type CalculatorId } from './calculators.ts'
 import { checkInputs } from './check.ts'
-import type {
-  CalculatorDefinition,
-  Caution,
-  Cell,
-  Inputs,
-  InputValue,
-  Outputs,
-  OutputValue,
-  PlainRow,
+import {
+  numberOf,
+  type CalculatorDefinition,
+  type Caution,
+  type Cell,
+  type Inputs,
+  type InputValue,
+  type Outputs,
+  type OutputValue,
+  type PlainRow,
 } from './definition.ts'
 import { CalculationError } from './errors.ts'
 import { writeFormula } from './formula.ts'
@@ -69,21 +70,25 @@ const unusual = (cell: Cell, key: string, name: string, value: unknown): Caution
 const rowsOf = (value: InputValue | undefined): readonly PlainRow[] =>
   Array.isArray(value) ? (value as readonly PlainRow[]) : typeof value === 'object' ? [value as PlainRow] : []
 
+const numbersOf = (value: InputValue | undefined): readonly unknown[] => (Array.isArray(value) ? value : [])
+
 /** One caution for each given value outside its usual range. */
 const unusualValues = (definition: CalculatorDefinition, given: Inputs): Caution[] =>
   Object.entries(definition.inputs).flatMap(([key, input]) =>
     input.kind === 'scalar' || input.kind === 'choice'
       ? unusual(input, key, input.label, given[key])
-      : rowsOf(given[key]).flatMap((row, i) =>
-          Object.entries(input.columns).flatMap(([name, cell]) =>
-            unusual(
-              cell,
-              key,
-              input.kind === 'rows' ? `${cell.label} in ${input.row} ${i + 1}` : cell.label,
-              row[name],
+      : input.kind === 'series'
+        ? numbersOf(given[key]).flatMap((value, i) => unusual(numberOf(input, i), key, numberOf(input, i).label, value))
+        : rowsOf(given[key]).flatMap((row, i) =>
+            Object.entries(input.columns).flatMap(([name, cell]) =>
+              unusual(
+                cell,
+                key,
+                input.kind === 'rows' ? `${cell.label} in ${input.row} ${i + 1}` : cell.label,
+                row[name],
+              ),
             ),
           ),
-        ),
   )
 
 const worstFirst = { stop: 0, check: 1, note: 2 }

@@ -1,4 +1,12 @@
-import type { CalculatorDefinition, Cell, Inputs, Outputs, PlainRow } from './definition.ts'
+import {
+  numberOf,
+  type CalculatorDefinition,
+  type Cell,
+  type Input,
+  type Inputs,
+  type Outputs,
+  type PlainRow,
+} from './definition.ts'
 import { CalculationError } from './errors.ts'
 import { normalPair, seededRandom } from './numeric/random.ts'
 import { calculate, calculator } from './solve.ts'
@@ -23,13 +31,9 @@ const findField = (definition: CalculatorDefinition, inputs: Inputs, name: strin
   const [, key = '', index, column] = pattern.exec(name) ?? []
   const input = Object.hasOwn(definition.inputs, key) ? definition.inputs[key]! : undefined
   if (!input) throw unknown()
-  const cell =
-    input.kind === 'rows' || input.kind === 'group'
-      ? column !== undefined && Object.hasOwn(input.columns, column)
-        ? input.columns[column]
-        : undefined
-      : input
-  if (cell?.kind !== 'scalar' || (input.kind === 'rows') !== (index !== undefined)) throw unknown()
+  const cell = cellOf(input, index === undefined ? undefined : Number(index), column)
+  if (cell?.kind !== 'scalar' || (input.kind === 'rows' || input.kind === 'series') !== (index !== undefined))
+    throw unknown()
   if (!(uncertainty >= 0) || !Number.isFinite(uncertainty))
     throw new CalculationError('not-finite', name, `${cell.label}: give a standard uncertainty that is not negative.`)
   const field: Omit<Field, 'value'> = {
@@ -46,15 +50,33 @@ const findField = (definition: CalculatorDefinition, inputs: Inputs, name: strin
   return { ...field, value }
 }
 
+/** The number that a column names, or the input itself where it has none. */
+const cellOf = (input: Input, index: number | undefined, column: string | undefined): Cell | undefined => {
+  switch (input.kind) {
+    case 'rows':
+    case 'group':
+      return column !== undefined && Object.hasOwn(input.columns, column) ? input.columns[column] : undefined
+    case 'series':
+      return column === undefined ? numberOf(input, index ?? 0) : undefined
+    default:
+      return column === undefined ? input : undefined
+  }
+}
+
 const read = (inputs: Inputs, { key, index, column }: Omit<Field, 'value'>): unknown => {
   const value = inputs[key]
-  if (column === undefined) return value
+  if (column === undefined) return index === undefined ? value : (value as readonly number[])[index]
   const row = index === undefined ? (value as PlainRow) : (value as readonly PlainRow[])[index]
   return row?.[column]
 }
 
 const replace = (inputs: Inputs, { key, index, column }: Field, value: number): Inputs => {
-  if (column === undefined) return { ...inputs, [key]: value }
+  if (column === undefined)
+    return {
+      ...inputs,
+      [key]:
+        index === undefined ? value : (inputs[key] as readonly number[]).map((old, i) => (i === index ? value : old)),
+    }
   if (index === undefined) return { ...inputs, [key]: { ...(inputs[key] as PlainRow), [column]: value } }
   return {
     ...inputs,

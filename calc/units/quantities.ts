@@ -39,6 +39,26 @@ export const quantities: Readonly<Record<Quantity, QuantityInfo>> = {
     ],
     example: '110 mm',
   },
+  volume: {
+    words: 'a volume',
+    si: { name: 'm³', mathjs: 'm^3' },
+    units: [
+      { name: 'L', mathjs: 'L' },
+      { name: 'm³', mathjs: 'm^3', from: 1 },
+      { name: 'ft³', mathjs: 'ft^3' },
+    ],
+    example: '80 L',
+  },
+  time: {
+    words: 'a time',
+    si: { name: 's', mathjs: 's' },
+    units: [
+      { name: 's', mathjs: 's' },
+      { name: 'min', mathjs: 'minute' },
+      { name: 'h', mathjs: 'hour' },
+    ],
+    example: '12.4 s',
+  },
   head: { words: 'a head', si: metre, units: [metre, { name: 'ft', mathjs: 'ft' }], example: '34 m' },
   flow: {
     words: 'a flow',

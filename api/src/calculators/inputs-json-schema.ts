@@ -1,5 +1,6 @@
 import type { OpenAPIObject } from '@nestjs/swagger'
 import type { CalculatorDefinition, Cell, Columns, Input } from '#calc/index.ts'
+import { numberOf } from '#calc/definition.ts'
 import { quantities } from '#calc/units/quantities.ts'
 
 type Schemas = NonNullable<NonNullable<OpenAPIObject['components']>['schemas']>
@@ -34,6 +35,14 @@ const ofInput = (input: Input): SchemaObject => {
       minItems: input.least,
       maxItems: input.most,
       items: ofColumns(input.columns),
+      description: input.label,
+    }
+  if (input.kind === 'series')
+    return {
+      type: 'array',
+      minItems: input.least,
+      maxItems: input.most,
+      items: ofCell(numberOf(input, 0)),
       description: input.label,
     }
   if (input.kind === 'group') return { ...ofColumns(input.columns), description: input.label }
