@@ -1,9 +1,58 @@
-import { Notice } from '../components/Notice.tsx'
+import { useSyncExternalStore } from 'react'
+import { Link, useLocation, useNavigate, useParams } from 'react-router-dom'
+import { calculators, type CalculatorDefinition } from '#calc/index.ts'
+import { Page } from '../components/Page.tsx'
+import { NotFound } from '../components/RouteError.tsx'
+import { textsIn } from '../features/calculators/address.ts'
+import { wordsOfStation } from '../features/calculators/by-station.ts'
+import { Calculator } from '../features/calculators/Calculator.tsx'
+import { CalculatorPlot } from '../features/calculators/CalculatorPlot.tsx'
+
+const never = () => () => undefined
+/** A page rendered at build knows no inputs: those of the address come as soon as the browser has taken it over. */
+const useIsLive = () =>
+  useSyncExternalStore(
+    never,
+    () => true,
+    () => false,
+  )
+
+/** Put into the history beside an address that the form itself wrote, so that it is not taken for a new one. */
+interface FormState {
+  form?: string
+}
 
 export function Component() {
+  const { id } = useParams()
+  const definition = Object.hasOwn(calculators, id!)
+    ? (calculators[id as keyof typeof calculators] as CalculatorDefinition)
+    : undefined
+  return definition ? <CalculatorPage definition={definition} /> : <NotFound>There is no calculator here.</NotFound>
+}
+
+function CalculatorPage({ definition: { id, title, summary, station } }: { definition: CalculatorDefinition }) {
+  const navigate = useNavigate()
+  const location = useLocation()
+  const isLive = useIsLive()
+  const form = (location.state as FormState | null)?.form ?? location.key
+  const write = (search: string) =>
+    void navigate({ search }, { replace: true, preventScrollReset: true, state: { form } satisfies FormState })
+
   return (
-    <Notice title="Calculator">
-      <p>This page is not open yet.</p>
-    </Notice>
+    <div className="page">
+      <Page title={title} description={summary} />
+      <p className="kicker">
+        <Link to="/calculators">Calculators</Link> · {wordsOfStation(station)}
+      </p>
+      <h1>{title}</h1>
+      <p className="lead">{summary}</p>
+      <Calculator
+        key={isLive ? `${id} ${form}` : id}
+        id={id}
+        texts={isLive ? textsIn(location.search) : undefined}
+        onSettle={write}
+        plot={(solved) => <CalculatorPlot id={id} inputs={solved.inputs} outputs={solved.solution.outputs} />}
+      />
+    </div>
   )
 }

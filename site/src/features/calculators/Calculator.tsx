@@ -1,0 +1,138 @@
+import { Button } from '@radix-ui/themes'
+import { useDeferredValue, useEffect, useId, useMemo, useRef, useState, type ReactNode } from 'react'
+import { calculator } from '#calc/index.ts'
+import { Working } from '../../components/Working.tsx'
+import { searchOf } from './address.ts'
+import './calculators.css'
+import { CopyLink } from './CopyLink.tsx'
+import { drawings } from './drawings/drawings.ts'
+import { changeForm, solveForm, startForm, type Form, type FormAction, type Solved, type Texts } from './form.ts'
+import { InputFields } from './InputFields.tsx'
+import { placeCautions, summaryOf } from './results.ts'
+import { Results } from './Results.tsx'
+import { SourcesAndLimits } from './SourcesAndLimits.tsx'
+
+export interface CalculatorProps {
+  id: string
+  /** Texts by path, as people write them: `flow: '9.5 L/s'`, `'sections.0.length': '120 m'`. What "Start again" goes back to. */
+  preset?: Texts
+  /** Texts that stand there first instead, such as those of an address. */
+  texts?: Texts
+  /** The outputs shown, apart by spaces; all unless told. */
+  show?: string
+  /** The level of the calculator's own heading; without one the page's heading names it. */
+  headingLevel?: 2 | 3 | 4
+  /** Told, a moment after the last key, how the address of these inputs ends. */
+  onSettle?: (search: string) => void
+  /** What stands under the drawing. */
+  plot?: (solved: Solved) => ReactNode
+}
+
+/** How long after the last key a change is said and written to the address. */
+const settleMilliseconds = 700
+
+interface State {
+  form: Form
+  /** The last form that could be worked out. */
+  good: Form | undefined
+}
+
+/** A live calculator: the fields keep what is written; everything else is worked out from them as it is drawn. */
+export function Calculator({ id, preset, texts, show, headingLevel, onSettle, plot }: CalculatorProps) {
+  const definition = calculator(id)
+  const [{ form, good }, setState] = useState<State>(() => {
+    const form = startForm(definition, texts ?? preset)
+    return { form, good: solveForm(definition, form).solution ? form : undefined }
+  })
+  const [said, setSaid] = useState('')
+  const settling = useRef<number>(undefined)
+  const headingId = useId()
+
+  const attempt = useMemo(() => solveForm(definition, form), [definition, form])
+  const kept = useMemo(() => (good ? solveForm(definition, good) : undefined), [definition, good])
+  const solved = attempt.solution ? attempt : kept?.solution ? kept : undefined
+  const errors = attempt.solution ? {} : attempt.errors
+  const drawn = useDeferredValue(solved)
+
+  useEffect(() => () => window.clearTimeout(settling.current), [])
+
+  const put = (next: Form) => {
+    const result = solveForm(definition, next)
+    setState({ form: next, good: result.solution ? next : good })
+    window.clearTimeout(settling.current)
+    settling.current = window.setTimeout(() => {
+      setSaid(
+        result.solution
+          ? summaryOf(definition, result.solution.outputs, keys)
+          : `${Object.values(result.errors)[0]} The results are those of the last numbers that could be worked out.`,
+      )
+      onSettle?.(searchOf(definition, next))
+    }, settleMilliseconds)
+  }
+  const change = (action: FormAction) => put(changeForm(definition, form, action))
+
+  const keys = show?.split(/\s+/).filter((key) => definition.outputs[key]) ?? Object.keys(definition.outputs)
+  const cautions = useMemo(
+    () => placeCautions(definition, form, solved?.solution.cautions ?? []),
+    [definition, form, solved],
+  )
+  const isStale = !attempt.solution
+  const Heading = headingLevel ? (`h${headingLevel}` as const) : undefined
+  const Subheading = `h${(headingLevel ?? 1) + 1}` as 'h2' | 'h3' | 'h4' | 'h5'
+  const Drawing = drawings[id]
+  const homeless = Object.entries(errors).filter(([path]) => !definition.inputs[path.split('.')[0]!])
+
+  return (
+    <section
+      className="calculator"
+      // In a lesson there may be several of one calculator: groups, not landmarks.
+      role={Heading ? 'group' : undefined}
+      aria-labelledby={Heading ? headingId : undefined}
+      aria-label={Heading ? undefined : definition.title}
+    >
+      {Heading && (
+        <Heading className="calculator-title" id={headingId}>
+          {definition.title}
+        </Heading>
+      )}
+      <div className="calculator-columns">
+        <form className="calculator-fields" onSubmit={(event) => event.preventDefault()} noValidate>
+          <InputFields definition={definition} form={form} errors={errors} cautions={cautions} change={change} />
+          <div className="calculator-actions no-print">
+            <CopyLink path={() => `/calculators/${id}${searchOf(definition, form)}`} />
+            <Button type="button" size="3" variant="outline" onClick={() => put(startForm(definition, preset))}>
+              Start again
+            </Button>
+          </div>
+        </form>
+        <div className="calculator-answers">
+          {homeless.map(([path, message]) => (
+            <p className="field-error" key={path}>
+              {message}
+            </p>
+          ))}
+          {isStale && (
+            <p className="stale-note">
+              {solved
+                ? 'These results are for the last numbers that could be worked out.'
+                : 'Results come when the fields can be worked out.'}
+            </p>
+          )}
+          {solved && (
+            <div className={isStale ? 'stale' : undefined}>
+              <Results definition={definition} outputs={solved.solution.outputs} keys={keys} cautions={cautions} />
+              {Drawing && drawn && <Drawing given={drawn.inputs} found={drawn.solution.outputs} />}
+              {drawn && plot?.(drawn)}
+              <Subheading className="calculator-subheading">Working</Subheading>
+              <Working steps={(drawn ?? solved).solution.working} />
+            </div>
+          )}
+        </div>
+      </div>
+      <p className="out-of-sight" role="status">
+        {said}
+      </p>
+      <SourcesAndLimits definition={definition} level={Subheading} />
+    </section>
+  )
+}
