@@ -14,8 +14,8 @@ const key = z.string().regex(/^[a-z][a-zA-Z0-9]*$/, 'use a name such as netHead'
 const plainValue = z.union([z.number(), z.string().min(1)], 'write a number, or a quantity as text such as 12 m')
 const row = z.record(key, plainValue)
 const literal = z.union(
-  [plainValue, row, z.array(row)],
-  'write a number, a quantity as text such as 12 m, or a list of rows',
+  [plainValue, z.array(plainValue), row, z.array(row)],
+  'write a number, a quantity as text such as 12 m, or a list',
 )
 const marks = z.number().positive().max(20).optional()
 const quantity = z.enum(Object.keys(quantities) as [Quantity, ...Quantity[]]).optional()

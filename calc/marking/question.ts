@@ -7,10 +7,10 @@ export type Drawn =
   | { of: string; times: [number, number]; step: PlainValue; quantity?: Quantity }
 
 /**
- * What a calculator's input, a row or a group gets. A text is a variable's name, an earlier part's id, a quantity as people write it
- * ("9.5 L/s") or a choice; a number is in SI.
+ * What a calculator's input, a list, a row or a group gets. A text is a variable's name, an earlier part's id, a quantity as people write it
+ * ("9.5 L/s") or a choice; a bare number serves where the quantity has no unit.
  */
-export type Literal = PlainValue | Record<string, PlainValue> | Record<string, PlainValue>[]
+export type Literal = PlainValue | PlainValue[] | Record<string, PlainValue> | Record<string, PlainValue>[]
 
 export type Tolerance = { relative: number } | { absolute: PlainValue }
 
