@@ -34,7 +34,7 @@ describe('POST /api/calculators/:id/solve', () => {
       cautions: { level: string }[]
     }
     // Torricelli: √(2 · 9.80665 · 45)
-    expect(outputs.jetVelocity).toBeCloseTo(29.7087, 4)
+    expect(outputs.jetVelocity).toBeCloseTo(29.7086, 4)
     expect(working[0]!.numbers).toContain('45')
     expect(cautions[0]!.level).toBe('stop')
   })

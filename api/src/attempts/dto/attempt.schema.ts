@@ -64,7 +64,8 @@ export type Answer = z.infer<typeof answerSchema>
 export const partResultSchema = z.object({
   /** The part's id; a question of one part has the one id "answer". */
   id: z.string(),
-  verdict: z.enum(['full', 'carried-forward', 'none']),
+  /** `partial`: some of several choices, places or pairs are right. */
+  verdict: z.enum(['full', 'carried-forward', 'partial', 'none']),
   marks: z.number(),
   outOf: z.number(),
   /** How the answer was understood: "read as 0.0125 m³/s". */

@@ -1,6 +1,16 @@
 import { boolean, doublePrecision, integer, jsonb, pgTable, text, timestamp, unique, uuid } from 'drizzle-orm/pg-core'
-import type { Answer, AttemptResult } from '../../attempts/dto/attempt.schema.ts'
+import type { Draw } from '#calc/marking/draw.ts'
+import type { QuestionResult } from '#calc/marking/result.ts'
+import type { Answer } from '../../attempts/dto/attempt.schema.ts'
 import { users } from './users.ts'
+
+/** The whole result, with the mistakes that were recognised; learners see it without their ids. */
+export interface RoundResult {
+  marks: number
+  outOf: number
+  passed: boolean
+  questions: Record<string, QuestionResult>
+}
 
 /** One round of a `<CheckYourself>` block. A lesson is done when all its blocks have a round that passed. */
 export const attempts = pgTable(
@@ -16,9 +26,9 @@ export const attempts = pgTable(
     /** Counts from 1. */
     round: integer().notNull(),
     /** The drawn questions whole, key and all, so that a bank mended later never alters a round already drawn. */
-    questions: jsonb().$type<unknown[]>().notNull(),
+    questions: jsonb().$type<Draw[]>().notNull(),
     answers: jsonb().$type<Record<string, Answer>>().notNull().default({}),
-    result: jsonb().$type<AttemptResult>(),
+    result: jsonb().$type<RoundResult>(),
     marks: doublePrecision(),
     outOf: doublePrecision(),
     passed: boolean(),
@@ -27,3 +37,4 @@ export const attempts = pgTable(
   },
   (table) => [unique('attempts_round_unique').on(table.userId, table.lesson, table.block, table.round)],
 )
+export type AttemptRow = typeof attempts.$inferSelect
