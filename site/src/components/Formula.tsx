@@ -79,6 +79,7 @@ const greek: Readonly<Record<string, string>> = {
   phi: 'φ',
   varphi: 'φ',
   psi: 'ψ',
+  sum: 'Σ',
   omega: 'ω',
 }
 

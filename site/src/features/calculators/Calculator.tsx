@@ -9,7 +9,7 @@ import { drawings } from './drawings/drawings.ts'
 import { changeForm, solveForm, startForm, type Form, type FormAction, type Solved, type Texts } from './form.ts'
 import { InputFields } from './InputFields.tsx'
 import { placeCautions, summaryOf } from './results.ts'
-import { Results } from './Results.tsx'
+import { Figures, Lists } from './Results.tsx'
 import { SourcesAndLimits } from './SourcesAndLimits.tsx'
 
 export interface CalculatorProps {
@@ -120,8 +120,9 @@ export function Calculator({ id, preset, texts, show, headingLevel, onSettle, pl
           )}
           {solved && (
             <div className={isStale ? 'stale' : undefined}>
-              <Results definition={definition} outputs={solved.solution.outputs} keys={keys} cautions={cautions} />
+              <Figures definition={definition} outputs={solved.solution.outputs} keys={keys} cautions={cautions} />
               {Drawing && drawn && <Drawing given={drawn.inputs} found={drawn.solution.outputs} />}
+              <Lists definition={definition} outputs={solved.solution.outputs} keys={keys} />
               {drawn && plot?.(drawn)}
               <Subheading className="calculator-subheading">Working</Subheading>
               <Working steps={(drawn ?? solved).solution.working} />

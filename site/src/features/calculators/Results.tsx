@@ -1,3 +1,4 @@
+import type { CSSProperties } from 'react'
 import type { CalculatorDefinition, Caution as CautionOf, Output, Outputs, PlainRow, PlainValue } from '#calc/index.ts'
 import { MathSymbol } from '../../components/Formula.tsx'
 import { CautionList } from './CautionList.tsx'
@@ -110,31 +111,37 @@ function RowsResult({ output, rows }: { output: RowsOutput; rows: readonly Plain
   )
 }
 
-export function Results({ definition, outputs, keys, cautions }: ResultsProps) {
-  const rows = keys.filter((key) => definition.outputs[key]!.kind === 'rows')
+/** Three or four side by side, whichever leaves fewer places empty. */
+const columnsFor = (count: number) => (count < 4 ? count : (4 - (count % 4)) % 4 < (3 - (count % 3)) % 3 ? 4 : 3)
+
+/** The figures, and the cautions about them. */
+export function Figures({ definition, outputs, keys, cautions }: ResultsProps) {
+  const shown = keys.flatMap((key) => {
+    const output = definition.outputs[key]!
+    const value = outputs[key]
+    return output.kind === 'rows' || value === undefined || typeof value === 'object' ? [] : [{ key, output, value }]
+  })
   return (
     <>
-      <dl className="results">
-        {keys.map((key) => {
-          const output = definition.outputs[key]!
-          const value = outputs[key]
-          return output.kind === 'rows' || value === undefined || typeof value === 'object' ? null : (
-            <Figure key={key} output={output} value={value} />
-          )
-        })}
+      <dl className="results" style={{ '--columns': columnsFor(shown.length) } as CSSProperties}>
+        {shown.map(({ key, output, value }) => (
+          <Figure key={key} output={output} value={value} />
+        ))}
       </dl>
-      {keys.map((key) => {
-        const about = cautions.get(`result ${key}`)
-        return about && <CautionList key={key} cautions={about} />
-      })}
-      <CautionList cautions={cautions.get('')} />
-      {rows.map((key) => (
-        <RowsResult
-          key={key}
-          output={definition.outputs[key] as RowsOutput}
-          rows={(outputs[key] ?? []) as readonly PlainRow[]}
-        />
+      {[...keys.map((key) => `result ${key}`), ''].map((place) => (
+        <CautionList key={place} cautions={cautions.get(place)} />
       ))}
     </>
   )
+}
+
+/** What is found as a list. */
+export function Lists({ definition, outputs, keys }: Omit<ResultsProps, 'cautions'>) {
+  return keys.map((key) => {
+    const output = definition.outputs[key]!
+    const rows = outputs[key]
+    return output.kind === 'rows' && typeof rows === 'object' ? (
+      <RowsResult key={key} output={output} rows={rows} />
+    ) : null
+  })
 }

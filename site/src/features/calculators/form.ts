@@ -50,6 +50,18 @@ export type Texts = Readonly<Record<string, string | number | undefined>>
 
 const firstUnit = (cell: ScalarCell): string => cell.unit ?? quantities[cell.quantity].units[0]!.name
 
+const valueOfOne = (cell: ScalarCell, unit: string) => {
+  const one = parse('1', cell.quantity, unit)
+  return one.ok ? one.value : undefined
+}
+
+/** The offered name of a unit that was written another way: l/min is L/min, m3/s is m³/s. */
+const offeredName = (cell: ScalarCell, unit: string): string => {
+  const names = quantities[cell.quantity].units.map(({ name }) => name)
+  if (names.includes(unit)) return unit
+  return names.find((name) => valueOfOne(cell, name) === valueOfOne(cell, unit)) ?? unit
+}
+
 /** The number alone, where a text is a number and its unit. */
 const numberPart = /^\s*([+\-−]?[\d.,\s\u00a0\u202f'’]*\d(?:\s*(?:e|[×x]\s*10\s*\^?)\s*[+\-−]?\d+)?)\s*(?=\D)/i
 
@@ -60,7 +72,9 @@ const splitUnit = (text: string, cell: ScalarCell): FieldText => {
   const number = numberPart.exec(text)?.[1]
   if (!reading.ok || number === undefined) return { text, unit }
   const alone = parse(number, cell.quantity, reading.unit)
-  return alone.ok && alone.value === reading.value ? { text: number, unit: reading.unit } : { text, unit }
+  return alone.ok && alone.value === reading.value
+    ? { text: number, unit: offeredName(cell, reading.unit) }
+    : { text, unit }
 }
 
 const startText = (cell: Cell, initial: PlainValue | undefined): FieldText => {
@@ -160,7 +174,7 @@ export const readField = (cell: ScalarCell, field: FieldText): Reading => parse(
 /** The unit that a field's number has: one written in the text goes before the one chosen. */
 export const unitOf = (cell: ScalarCell, field: FieldText): string => {
   const reading = readField(cell, field)
-  return reading.ok ? reading.unit : field.unit
+  return reading.ok ? offeredName(cell, reading.unit) : field.unit
 }
 
 /** The units to choose from, and the one in use where it is another. */
