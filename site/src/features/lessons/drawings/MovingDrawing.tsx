@@ -1,7 +1,7 @@
 import { useId, type ReactNode } from 'react'
 import './drawings.css'
 
-interface Props {
+interface SliderProps {
   /** What the slider changes. */
   label: string
   from: number
@@ -13,15 +13,29 @@ interface Props {
   said: string
   /** What the drawing shows at this value, in one or two sentences: its name for those who cannot see it. */
   shows: string
+  caption: string
+}
+
+interface Props extends SliderProps {
   width: number
   height: number
   /** Lines and words. */
   children: ReactNode
-  caption: string
 }
 
 /** A line drawing that one slider moves. */
-export function MovingDrawing({
+export function MovingDrawing({ width, height, children, ...slider }: Props) {
+  return (
+    <WithSlider {...slider}>
+      <svg viewBox={`0 0 ${width} ${height}`} style={{ maxWidth: width * 1.25 }} role="img" aria-label={slider.shows}>
+        {children}
+      </svg>
+    </WithSlider>
+  )
+}
+
+/** Any picture that one slider moves; the picture brings its own name. */
+export function WithSlider({
   label,
   from,
   to,
@@ -30,17 +44,13 @@ export function MovingDrawing({
   onChange,
   said,
   shows,
-  width,
-  height,
-  children,
   caption,
-}: Props) {
+  children,
+}: SliderProps & { children: ReactNode }) {
   const id = useId()
   return (
     <div className="moving-drawing">
-      <svg viewBox={`0 0 ${width} ${height}`} style={{ maxWidth: width * 1.25 }} role="img" aria-label={shows}>
-        {children}
-      </svg>
+      {children}
       <div className="moving-drawing-slider">
         <label htmlFor={id}>{label}</label>
         <output htmlFor={id}>{said}</output>

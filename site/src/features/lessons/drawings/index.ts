@@ -10,4 +10,6 @@ export const drawings: Record<string, ComponentType> = {
   'jet-draws-in': lazy(async () => ({ default: (await import('./JetDrawsIn.tsx')).JetDrawsIn })),
   'bucket-and-jet': lazy(async () => ({ default: (await import('./BucketAndJet.tsx')).BucketAndJet })),
   'pitch-circle': lazy(async () => ({ default: (await import('./PitchCircle.tsx')).PitchCircle })),
+  'what-the-gauge-shows': lazy(async () => ({ default: (await import('./WhatTheGaugeShows.tsx')).WhatTheGaugeShows })),
+  'five-readings': lazy(async () => ({ default: (await import('./FiveReadings.tsx')).FiveReadings })),
 }
