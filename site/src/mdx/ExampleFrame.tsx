@@ -14,7 +14,7 @@ interface ExampleFrameProps {
 export function ExampleFrame({ kind, title, given, children }: ExampleFrameProps) {
   const id = useId()
   return (
-    <section className="example" aria-labelledby={id}>
+    <div className="example" role="group" aria-labelledby={id}>
       <h3 id={id}>
         <span className="aside-name">{kind}</span> {title}
       </h3>
@@ -27,6 +27,6 @@ export function ExampleFrame({ kind, title, given, children }: ExampleFrameProps
         ))}
       </dl>
       {children}
-    </section>
+    </div>
   )
 }

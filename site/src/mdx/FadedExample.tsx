@@ -23,9 +23,7 @@ export default function FadedExample({ id, blank, children, ...attributes }: Fad
   const isBlank = ({ gives }: PrintedStep) => gives !== undefined && blanks.includes(gives)
   const firstOpen = working.findIndex((step) => isBlank(step) && !filled.includes(step.gives!))
   const steps = working.map((step, i) => {
-    if (firstOpen === -1 || i < firstOpen) return step
-    const { numbers: _, ...unsolved } = step
-    return unsolved
+    return firstOpen === -1 || i < firstOpen ? step : { ...step, numbers: undefined }
   })
 
   const below = (step: PrintedStep) => {

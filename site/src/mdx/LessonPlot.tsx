@@ -1,4 +1,6 @@
 import type { ReactNode } from 'react'
+import type { CalculatorDefinition } from '#calc/index.ts'
+import { parse } from '#calc/units/parse.ts'
 import { Plot } from '../components/Plot.tsx'
 import type { Attributes } from './attributes.ts'
 import { workOut } from './example.ts'
@@ -6,17 +8,35 @@ import { workOut } from './example.ts'
 interface LessonPlotProps {
   id: string
   /** An output, and the input that it is drawn against. */
-  of: string
-  against: string
-  /** From this part of the number given to that multiple. */
-  from?: number
-  to?: number
+  output: string
+  input: string
+  /** Where the plot begins and ends, as quantities of the input. */
+  from?: string
+  to?: string
   children?: ReactNode
   [input: string]: Attributes[string] | ReactNode
 }
 
+/** A quantity as a multiple of the number that the plot is drawn around. */
+const multiple = ({ inputs }: CalculatorDefinition, key: string, text: string | undefined, of: unknown) => {
+  const input = inputs[key]
+  if (text === undefined || input?.kind !== 'scalar' || typeof of !== 'number') return undefined
+  const reading = parse(text, input.quantity)
+  return reading.ok ? reading.value / of : undefined
+}
+
 /** How one output of a calculator goes with one input, around the lesson's numbers. */
-export default function LessonPlot({ id, of, against, from, to, children, ...attributes }: LessonPlotProps) {
-  const { inputs } = workOut(id, attributes as Attributes, children)
-  return <Plot id={id} inputs={inputs} of={of} against={against} from={from} to={to} />
+export default function LessonPlot({ id, output, input, from, to, children, ...attributes }: LessonPlotProps) {
+  const { definition, inputs } = workOut(id, attributes as Attributes, children)
+  const now = inputs[input]
+  return (
+    <Plot
+      id={id}
+      inputs={inputs}
+      of={output}
+      against={input}
+      from={multiple(definition, input, from, now)}
+      to={multiple(definition, input, to, now)}
+    />
+  )
 }

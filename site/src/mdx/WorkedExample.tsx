@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react'
 import type { Caution } from '#calc/index.ts'
 import { Working } from '../components/Working.tsx'
-import { Results } from '../features/calculators/Results.tsx'
+import { Figures, Lists } from '../features/calculators/Results.tsx'
 import type { Attributes } from './attributes.ts'
 import { ExampleFrame } from './ExampleFrame.tsx'
 import { workOut } from './example.ts'
@@ -22,7 +22,8 @@ export default function WorkedExample({ id, children, ...attributes }: WorkedExa
   return (
     <ExampleFrame kind="Worked example" title={definition.title} given={given}>
       <Working steps={working} />
-      <Results definition={definition} outputs={outputs} keys={keys} cautions={none} />
+      <Figures definition={definition} outputs={outputs} keys={keys} cautions={none} />
+      <Lists definition={definition} outputs={outputs} keys={Object.keys(definition.outputs)} />
     </ExampleFrame>
   )
 }

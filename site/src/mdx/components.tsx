@@ -1,5 +1,5 @@
 import type { MDXComponents } from 'mdx/types'
-import { lazy, Suspense, useContext, type ComponentProps, type ComponentType, type LazyExoticComponent } from 'react'
+import { lazy, Suspense, useContext, type ComponentProps, type ComponentType } from 'react'
 import { Caution } from '../components/Caution.tsx'
 import { Drawing } from '../features/lessons/Drawing.tsx'
 import { FromTheTrade } from '../features/lessons/FromTheTrade.tsx'
@@ -14,7 +14,7 @@ import { LessonContext } from './lesson-context.ts'
 
 /** What calculates comes after the lesson's text, with the library behind it. */
 function later<P extends object>(words: string, load: () => Promise<{ default: ComponentType<P> }>) {
-  const Loaded = lazy(load) as LazyExoticComponent<ComponentType<P>>
+  const Loaded = lazy<ComponentType<P>>(load)
   return function Later(props: P) {
     return (
       <Suspense fallback={<p className="on-its-way">{words}</p>}>

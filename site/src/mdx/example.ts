@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react'
-import { calculator, type CalculatorDefinition } from '#calc/index.ts'
+import { calculator, type CalculatorDefinition, type Cell } from '#calc/index.ts'
+import { columnsOfRow, isMany, pathOf } from '../features/calculators/columns.ts'
 import { shownKeys, solveForm, startForm, type FieldText, type Form } from '../features/calculators/form.ts'
 import { textsFrom, type Attributes } from './attributes.ts'
 
@@ -10,25 +11,22 @@ export interface GivenValue {
 
 const written = ({ text, unit }: FieldText) => [text, unit].filter(Boolean).join('\u00a0')
 
-const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1)
-
 /** The values that a calculation starts from: those the lesson names, and those it cannot do without. */
 function givenValues(definition: CalculatorDefinition, form: Form, isNamed: (path: string) => boolean): GivenValue[] {
+  const value = (label: string, cell: Cell, path: string, field: FieldText): GivenValue[] => {
+    if (field.text === '' || (cell.optional && !isNamed(path))) return []
+    const text = cell.kind === 'choice' ? (cell.words?.[field.text] ?? field.text.replaceAll('-', ' ')) : written(field)
+    return [{ label, text }]
+  }
   return shownKeys(definition, form).flatMap((key) => {
     const input = definition.inputs[key]!
-    const value = (cell: typeof input & { kind: 'scalar' | 'choice' }, path: string, field: FieldText, of = '') => {
-      if (field.text === '' || (cell.optional && !isNamed(path))) return []
-      const text =
-        cell.kind === 'choice' ? (cell.words?.[field.text] ?? field.text.replaceAll('-', ' ')) : written(field)
-      return [{ label: of + cell.label, text }]
-    }
-    if (input.kind === 'scalar' || input.kind === 'choice') return value(input, key, form.fields[key]!)
+    if (!isMany(input)) return value(input.label, input, key, form.fields[key]!)
     return form.rows[key]!.flatMap((row, i) =>
-      Object.entries(input.columns).flatMap(([name, cell]) =>
-        input.kind === 'group'
-          ? value(cell, `${key}.${name}`, row[name]!)
-          : value(cell, `${key}.${i}.${name}`, row[name]!, `${capital(input.row)} ${i + 1}: `),
-      ),
+      Object.entries(columnsOfRow(definition, input, row)).flatMap(([name, cell]) => {
+        const of = input.kind === 'rows' ? `${input.row} ${i + 1}: ` : ''
+        const label = input.kind === 'series' ? `${cell.label} ${i + 1}` : of + cell.label
+        return value(label.charAt(0).toUpperCase() + label.slice(1), cell, pathOf(input, key, i, name), row[name]!)
+      }),
     )
   })
 }

@@ -30,25 +30,22 @@ export function LessonPage({ course, lesson, contents, children }: LessonPagePro
       </div>
       <article className="lesson-article">
         <header className="lesson-head">
-          <div>
-            <p className="kicker">
-              <Link to={`/courses/${course.slug}`}>
-                {course.number} · {course.title}
-              </Link>{' '}
-              — lesson {lesson.number}
-              {lesson.minutes !== undefined && ` · ${lesson.minutes} minutes`}
-              {isDone && <strong className="lesson-done"> · ✓ Done</strong>}
+          <p className="kicker">
+            <Link to={`/courses/${course.slug}`}>
+              {course.number} · {course.title}
+            </Link>{' '}
+            — lesson {lesson.number}
+            {lesson.minutes !== undefined && ` · ${lesson.minutes} minutes`}
+            {isDone && <strong className="lesson-done"> · ✓ Done</strong>}
+          </p>
+          <h1>{lesson.title}</h1>
+          {lesson.hazards.length > 0 && (
+            <p className="lesson-hazards">
+              <strong>Touches on danger:</strong> {listed.format(lesson.hazards.map((hazard) => hazardWords[hazard]))}.
             </p>
-            <h1>{lesson.title}</h1>
-            {lesson.hazards.length > 0 && (
-              <p className="lesson-hazards">
-                <strong>Touches on danger:</strong> {listed.format(lesson.hazards.map((hazard) => hazardWords[hazard]))}
-                .
-              </p>
-            )}
-          </div>
-          {contents && contents.length > 0 && <LessonContents contents={contents} />}
+          )}
         </header>
+        {contents && contents.length > 0 && <LessonContents contents={contents} />}
         {children}
         <LessonNeighbours course={course} lesson={lesson} />
       </article>
@@ -56,17 +53,30 @@ export function LessonPage({ course, lesson, contents, children }: LessonPagePro
   )
 }
 
+/** Beside the first paragraphs where there is room; folded up above them where there is none. */
 function LessonContents({ contents }: { contents: readonly ContentsEntry[] }) {
   return (
-    <nav className="lesson-contents" aria-labelledby="lesson-contents-title">
-      <h2 id="lesson-contents-title">In this lesson</h2>
-      <ol>
-        {contents.map(({ id, title }) => (
-          <li key={id}>
-            <a href={`#${id}`}>{title}</a>
-          </li>
-        ))}
-      </ol>
+    <nav className="lesson-contents" aria-label="In this lesson">
+      <div className="contents-wide">
+        <p>In this lesson</p>
+        <ContentsList contents={contents} />
+      </div>
+      <details className="contents-narrow">
+        <summary>In this lesson</summary>
+        <ContentsList contents={contents} />
+      </details>
     </nav>
+  )
+}
+
+function ContentsList({ contents }: { contents: readonly ContentsEntry[] }) {
+  return (
+    <ol>
+      {contents.map(({ id, title }) => (
+        <li key={id}>
+          <a href={`#${id}`}>{title}</a>
+        </li>
+      ))}
+    </ol>
   )
 }

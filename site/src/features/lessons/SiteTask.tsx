@@ -4,7 +4,7 @@ import type { ReactNode } from 'react'
 export function SiteTask({ children }: { children: ReactNode }) {
   return (
     <div className="site-task" role="note">
-      <p className="aside-name">On site</p>
+      <p className="aside-name">Task to do on site</p>
       {children}
     </div>
   )

@@ -1,6 +1,6 @@
 import { Button, Skeleton } from '@radix-ui/themes'
 import { useQuery } from '@tanstack/react-query'
-import { useId, type ReactNode } from 'react'
+import { useId, useRef, type ReactNode } from 'react'
 import { Link } from 'react-router-dom'
 import { ErrorCallout } from '../../components/ErrorCallout.tsx'
 import { hasCode } from '../../lib/api-error.ts'
@@ -22,18 +22,19 @@ interface CheckYourselfProps {
 /** A block of marked questions in a lesson. */
 export function CheckYourself(props: CheckYourselfProps) {
   const headingId = useId()
+  const heading = useRef<HTMLHeadingElement>(null)
   const { count } = props
   return (
     <section className="check-yourself" aria-labelledby={headingId}>
-      <h3 id={headingId} tabIndex={-1}>
-        <span className="aside-name">Check yourself</span> {count} {count === 1 ? 'question' : 'questions'}
+      <h3 id={headingId} ref={heading} tabIndex={-1}>
+        {count} {count === 1 ? 'question' : 'questions'}, drawn for you
       </h3>
-      <Questions {...props} />
+      <Questions {...props} toTop={() => heading.current?.focus()} />
     </section>
   )
 }
 
-function Questions({ course, lesson, block }: CheckYourselfProps) {
+function Questions({ course, lesson, block, toTop }: CheckYourselfProps & { toTop: () => void }) {
   const me = useMe()
   const place = useQuery({ ...courseQueries.detail(course), enabled: Boolean(me.data) })
   const mayAnswer = Boolean(me.data) && place.data?.enrolled === true
@@ -68,7 +69,7 @@ function Questions({ course, lesson, block }: CheckYourselfProps) {
     )
   }
   if (!round.data) return <QuestionsSkeleton />
-  return <Round key={round.data.id} attempt={round.data} />
+  return <Round key={round.data.id} attempt={round.data} onAgain={toTop} />
 }
 
 function Invitation({ what, children }: { what: string; children: ReactNode }) {

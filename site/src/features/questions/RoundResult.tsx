@@ -15,15 +15,19 @@ interface RoundResultProps {
   result: AttemptResult
   /** After handing in, the result is where reading goes on. */
   takeFocus: boolean
+  onAgain: () => void
 }
 
 /** What a round earned, and why, question by question. */
-export default function RoundResult({ attempt, result, takeFocus }: RoundResultProps) {
+export default function RoundResult({ attempt, result, takeFocus, onAgain }: RoundResultProps) {
   const summary = useRef<HTMLDivElement>(null)
   const again = useMutation(useStartAttemptOptions(attempt.lesson, attempt.block))
   useEffect(() => {
     if (takeFocus) summary.current?.focus()
   }, [takeFocus])
+
+  // The new round takes this result's place: what comes after must not hang on it.
+  const drawAgain = () => void again.mutateAsync().then(onAgain, () => undefined)
 
   return (
     <div className="round-result">
@@ -45,16 +49,9 @@ export default function RoundResult({ attempt, result, takeFocus }: RoundResultP
           </li>
         ))}
       </ol>
-      {again.isError && (
-        <ErrorCallout title="There is no new round yet." error={again.error} retry={() => again.mutate()} />
-      )}
+      {again.isError && <ErrorCallout title="There is no new round yet." error={again.error} retry={drawAgain} />}
       <div className="actions no-print">
-        <Button
-          size="3"
-          variant={result.passed ? 'outline' : 'solid'}
-          loading={again.isPending}
-          onClick={() => again.mutate()}
-        >
+        <Button size="3" variant={result.passed ? 'outline' : 'solid'} loading={again.isPending} onClick={drawAgain}>
           Another round, other numbers
         </Button>
       </div>
@@ -97,7 +94,7 @@ function QuestionResult({ question, position, attempt, result }: QuestionResultP
 const verdictOf = ({ verdict, marks }: PartResult) => {
   if (verdict === 'full') return { className: 'verdict-full', words: '✓ Full marks' }
   if (verdict === 'carried-forward') return { className: 'verdict-carried', words: '✓ Full marks, carried forward' }
-  return marks > 0
+  return verdict === 'partial'
     ? { className: 'verdict-part', words: `Partly right: ${number.format(marks)} marks` }
     : { className: 'verdict-none', words: '✗ No marks' }
 }
