@@ -6,6 +6,7 @@ import { friction } from './pipe/friction.ts'
 import { gaugeReading } from './pipe/gauge-reading.ts'
 import { penstock } from './pipe/penstock.ts'
 import { flowByBucket } from './site/flow-by-bucket.ts'
+import { headByGauge } from './site/head-by-gauge.ts'
 import { power } from './water/power.ts'
 import { water } from './water/water.ts'
 
@@ -13,6 +14,7 @@ import { water } from './water/water.ts'
 export const calculators = {
   water,
   power,
+  'head-by-gauge': headByGauge,
   'flow-by-bucket': flowByBucket,
   friction,
   fittings,

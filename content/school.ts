@@ -16,7 +16,7 @@ export interface SchoolLesson {
   bank: Question[]
 }
 
-/** Every lesson that is written, by its slug. */
+/** Every lesson that is written, by its slug, in the order of the courses. */
 export type School = ReadonlyMap<string, SchoolLesson>
 
 /** `…/jet-and-runner/04-runner-speed.mdx` or `.questions.yaml`. */
@@ -42,7 +42,7 @@ const readSchoolLesson = (path: string, texts: Readonly<Record<string, string>>)
     for (const id of questions)
       if (!bank.some((question) => question.id === id))
         throw new Error(`${path}: the questions “${name}” name “${id}”, which the bank does not have.`)
-  return { slug, course: course!, number: Number(number), frontmatter, blocks, headings, bank }
+  return { slug: slug!, course: course!, number: Number(number), frontmatter, blocks, headings, bank }
 }
 
 /**
@@ -65,5 +65,6 @@ export const readSchool = (texts: Readonly<Record<string, string>>): School => {
     }
     school.set(lesson.slug, lesson)
   }
-  return school
+  const inOrder = courseList.flatMap(({ lessons }) => lessons.flatMap(({ slug }) => school.get(slug) ?? []))
+  return new Map(inOrder.map((lesson) => [lesson.slug, lesson]))
 }

@@ -97,7 +97,7 @@ export class AttemptsService {
   private drawRound(questions: readonly Question[], of: { slug: string; block: string; round: number; user: User }) {
     const fixed = this.config.get('DRAW_SEED', { infer: true })
     const seed = fixed === undefined ? randomUUID() : [fixed, of.user.email, of.slug, of.block, of.round].join(' ')
-    return questions.map((question) => draw(question, `${seed} ${question.id}`))
+    return questions.map((question) => draw(question, seed))
   }
 
   private async lastRound(slug: string, block: string, user: User): Promise<AttemptRow | undefined> {
