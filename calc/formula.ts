@@ -9,6 +9,8 @@ export interface Aside {
   value: number
   say: string
   digits?: number
+  /** Printed after the number: for a result that is no output. */
+  unit?: string
 }
 
 /** A formula whose holes are keys or asides; there is one part more than holes. */

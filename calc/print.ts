@@ -1,7 +1,7 @@
 import type { CalculatorDefinition, Inputs, Outputs, Quantity, Step } from './definition.ts'
 import { fill, speak, spoken, type Aside, type Formula } from './formula.ts'
-import { conversion, quantities } from './units/quantities.ts'
-import { formatNumber, unitFor } from './units/format.ts'
+import { format, formatNumber, unitFor } from './units/format.ts'
+import { quantities } from './units/quantities.ts'
 
 /** A step of a working, printed: TeX with symbols, TeX with this calculation's numbers, and words. */
 export interface PrintedStep {
@@ -28,10 +28,8 @@ const superscript: Record<string, string> = {
   '⁹': '9',
 }
 
-const texNumber = (value: number, digits: number): string => {
-  const text = formatNumber(value, digits)
-    .replace('−', '-')
-    .replace(/\u00a0/g, '{\\,}')
+const texOf = (formatted: string): string => {
+  const text = formatted.replace('−', '-').replace(/\u00a0/g, '{\\,}')
   const power = /^(.*) ×(?:\u00a0| )?10([⁻⁰¹²³⁴-⁹]+)$/.exec(
     text.replace('{\\,}×{\\,}', ' ×').replace(/{\\,}/g, '\u00a0'),
   )
@@ -46,7 +44,7 @@ const putIn = (value: number, digits = digitsPutIn): string => {
   const figures = short.toExponential().split('e')[0]!.replace(/\D/g, '').length
   const tex =
     /e/.test(exact) || Math.abs(short) >= 10_000 || (short !== 0 && Math.abs(short) < 1e-4)
-      ? texNumber(short, figures)
+      ? texOf(formatNumber(short, figures))
       : exact
   return value < 0 || tex.includes('times') ? `(${value < 0 ? '-' : ''}${tex.replace('-', value < 0 ? '' : '-')})` : tex
 }
@@ -60,12 +58,10 @@ const texUnit = (unit: string): string =>
 
 /** A result in SI and, where people would say it otherwise, in that unit too. */
 const result = (value: number, quantity: Quantity, digits: number, unit?: string): string => {
-  const si = quantities[quantity].si
-  const natural = unitFor(quantity, value, unit)
-  const inSi = `= ${texNumber(value, digits)}${texUnit(si.name)}`
-  return natural.name === si.name
-    ? inSi
-    : `${inSi} = ${texNumber(conversion(quantity, natural)!.fromSi(value), digits)}${texUnit(natural.name)}`
+  const si = quantities[quantity].si.name
+  const natural = unitFor(quantity, value, unit).name
+  const inUnit = (name: string) => `= ${texOf(format(value, quantity, { digits, unit: name }).text)}${texUnit(name)}`
+  return natural === si ? inUnit(si) : `${inUnit(si)} ${inUnit(natural)}`
 }
 
 /**
@@ -90,7 +86,7 @@ export const printWorking = (
     const symbol = (hole: string | Aside) =>
       typeof hole === 'string' ? (said(hole).symbol ?? `\\text{${said(hole).label}}`) : hole.symbol
     const number = (hole: string | Aside) => {
-      if (typeof hole !== 'string') return putIn(hole.value, hole.digits)
+      if (typeof hole !== 'string') return putIn(hole.value, hole.digits) + texUnit(hole.unit ?? '')
       const value = hole === gives ? undefined : (found[hole] ?? given[hole])
       return typeof value === 'number' ? putIn(value) : symbol(hole)
     }

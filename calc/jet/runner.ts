@@ -149,7 +149,7 @@ export const runner = defineCalculator({
         : [
             {
               say: 'The net head gives the jet its speed.',
-              formula: write`${'velocityCoefficient'} \, \sqrt{2 \, ${gravity} \, ${'netHead'}} = ${jetSpeed}`,
+              formula: write`${'velocityCoefficient'} \, \sqrt{2 \, ${gravity} \, ${'netHead'}} = ${{ ...jetSpeed, unit: 'm/s' }}`,
             },
           ]),
       {

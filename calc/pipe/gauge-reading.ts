@@ -140,6 +140,11 @@ export const gaugeReading = defineCalculator({
     }
   },
   working(write, { insideDiameter, flow, waterTemperature }, { velocityHead, headLoss, lossFraction, flowEstimate }) {
+    const velocity = {
+      symbol: 'v',
+      value: flow === undefined ? 0 : boreVelocity(flow, insideDiameter),
+      say: 'the velocity at the gauge',
+    }
     const density = { symbol: '\\rho', value: waterDensity(waterTemperature), say: 'the density of water' }
     return [
       {
@@ -152,11 +157,11 @@ export const gaugeReading = defineCalculator({
         : [
             {
               say: 'How fast the water passes the gauge.',
-              formula: write`\frac{4 \, ${'flow'}}{\pi \, ${'insideDiameter'}^2} = ${{ symbol: 'v', value: boreVelocity(flow, insideDiameter), say: 'the velocity at the gauge' }}`,
+              formula: write`\frac{4 \, ${'flow'}}{\pi \, ${'insideDiameter'}^2} = ${{ ...velocity, unit: 'm/s' }}`,
             },
             {
               say: 'Moving water keeps this head as speed; the gauge does not show it, and it is not lost.',
-              formula: write`${'velocityHead'} = \frac{${{ symbol: 'v', value: boreVelocity(flow, insideDiameter), say: 'the velocity at the gauge' }}^2}{2 \, ${gravity}}`,
+              formula: write`${'velocityHead'} = \frac{${velocity}^2}{2 \, ${gravity}}`,
               gives: 'velocityHead' as const,
             },
           ]),

@@ -25,22 +25,33 @@ export interface SectionLoss {
 }
 
 export const sectionLoss = (flow: number, section: Section, kinematicViscosity: number): SectionLoss => {
-  const { headLoss, ...inPipe } = pipeLoss(flow / section.parallel, section, kinematicViscosity)
-  return { ...inPipe, frictionLoss: headLoss, fittingsLoss: section.totalK * velocityHead(inPipe.velocity) }
+  const { velocity, reynolds, frictionFactor, headLoss } = pipeLoss(
+    flow / section.parallel,
+    section,
+    kinematicViscosity,
+  )
+  return {
+    velocity,
+    reynolds,
+    ...(frictionFactor === undefined ? {} : { frictionFactor }),
+    frictionLoss: headLoss,
+    fittingsLoss: section.totalK * velocityHead(velocity),
+  }
 }
 
-const headLoss = (flow: number, sections: readonly Section[], kinematicViscosity: number): number => {
+/** Without a row for each section: the root below asks this again and again. */
+const headLossOf = (flow: number, sections: readonly Section[], kinematicViscosity: number): number => {
   let sum = 0
   for (const section of sections) {
-    const { frictionLoss, fittingsLoss } = sectionLoss(flow, section, kinematicViscosity)
-    sum += frictionLoss + fittingsLoss
+    const { velocity, headLoss } = pipeLoss(flow / section.parallel, section, kinematicViscosity)
+    sum += headLoss + section.totalK * velocityHead(velocity)
   }
   return sum
 }
 
 /**
- * The flow Q = a·√(2g·(gross head − loss(Q))) that a discharging area a = Σ Cd·A of open nozzles draws through a penstock, to 1e-13. The
- * frictionless flow a·√(2gH) is its upper bound; since the loss goes nearly with Q², one step from there lands close to the root.
+ * The flow Q = a·√(2g·(gross head − loss(Q))) that a discharging area a = Σ Cd·A of open nozzles draws through a penstock, to 1e-10. The
+ * root is sought over Q², in which the head used up is nearly a straight line.
  */
 export const flowThroughNozzles = (
   grossHead: number,
@@ -48,12 +59,10 @@ export const flowThroughNozzles = (
   dischargingArea: number,
   kinematicViscosity: number,
 ): number => {
-  const perFlowSquared = 1 / (2 * g * dischargingArea ** 2)
-  const headLeft = (flow: number) =>
-    grossHead - headLoss(flow, sections, kinematicViscosity) - perFlowSquared * flow * flow
-  const frictionless = dischargingArea * Math.sqrt(2 * g * grossHead)
-  const close = frictionless * Math.sqrt(grossHead / (grossHead - headLeft(frictionless)))
-  const [low, high] = headLeft(close) < 0 ? [0, close] : [close, frictionless]
-  // The ends bracket a root: head is left over without flow, and none at the frictionless flow.
-  return bracketedRoot(headLeft, low, high, { tolerance: 1e-13 })!
+  const perSquare = 1 / (2 * g * dischargingArea ** 2)
+  const headLeft = (squaredFlow: number) =>
+    grossHead - headLossOf(Math.sqrt(squaredFlow), sections, kinematicViscosity) - perSquare * squaredFlow
+  // All the head is left over without flow; a hair above the flow without friction there is too little, whatever rounding does.
+  const withoutFriction = grossHead / perSquare
+  return Math.sqrt(bracketedRoot(headLeft, 0, withoutFriction * (1 + 1e-9), { tolerance: 1e-10 })!)
 }

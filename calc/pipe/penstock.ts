@@ -96,7 +96,7 @@ export const penstock = defineCalculator({
     flow: { kind: 'scalar', symbol: 'Q', label: 'Flow', quantity: 'flow' },
     netHead: { kind: 'scalar', symbol: 'H_n', label: 'Net head', quantity: 'head' },
     headLoss: { kind: 'scalar', symbol: 'h', label: 'Head loss', quantity: 'head' },
-    lossFraction: { kind: 'scalar', symbol: 'h/H_g', label: 'Share of the gross head lost', quantity: 'fraction' },
+    lossFraction: { kind: 'scalar', symbol: 'r', label: 'Share of the gross head lost', quantity: 'fraction' },
     sections: {
       kind: 'rows',
       label: 'Sections of pipe',
@@ -158,6 +158,7 @@ export const penstock = defineCalculator({
   },
   working(write, { sections, nozzles }, found) {
     const aside = (symbol: string, value: number, say: string): Aside => ({ symbol, value, say })
+    const inUnit = (hole: Aside, unit: string): Aside => ({ ...hole, unit })
     const lossOf = (i: number) => {
       const { frictionLoss, fittingsLoss } = found.sections[i]!
       return aside(`h_{${i + 1}}`, frictionLoss + fittingsLoss, `the loss in section ${i + 1}`)
@@ -187,15 +188,15 @@ export const penstock = defineCalculator({
             say: `Section ${n}: the water’s speed${parallel === 1 ? '' : ' in each of its pipes'}.`,
             formula:
               parallel === 1
-                ? write`\frac{4 \, ${'flow'}}{\pi \, ${D}^2} = ${v}`
-                : write`\frac{4 \, ${'flow'}}{${pipes} \, \pi \, ${D}^2} = ${v}`,
+                ? write`\frac{4 \, ${'flow'}}{\pi \, ${D}^2} = ${inUnit(v, 'm/s')}`
+                : write`\frac{4 \, ${'flow'}}{${pipes} \, \pi \, ${D}^2} = ${inUnit(v, 'm/s')}`,
           },
           ...(frictionFactor === undefined
             ? []
             : [
                 {
                   say: `Section ${n}: what its wall and its fittings take at that speed.`,
-                  formula: write`\left( ${aside(`f_{${n}}`, frictionFactor, `the friction factor of section ${n}`)} \, \frac{${aside(`L_{${n}}`, length, `the length of section ${n}`)}}{${D}} + ${aside(`K_{${n}}`, totalK, `the fittings’ coefficients of section ${n}`)} \right) \, \frac{${v}^2}{2 \, ${gravity}} = ${lossOf(i)}`,
+                  formula: write`\left( ${aside(`f_{${n}}`, frictionFactor, `the friction factor of section ${n}`)} \, \frac{${aside(`L_{${n}}`, length, `the length of section ${n}`)}}{${D}} + ${aside(`K_{${n}}`, totalK, `the fittings’ coefficients of section ${n}`)} \right) \, \frac{${v}^2}{2 \, ${gravity}} = ${inUnit(lossOf(i), 'm')}`,
                 },
               ]),
         ]
