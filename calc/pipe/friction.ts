@@ -57,8 +57,14 @@ export const friction = defineCalculator({
         'roughness',
         'A roughness of half the inside diameter leaves no pipe. Give the height of the grains on the wall, such as 0.05 mm.',
       )
-    const loss = pipeLoss(flow, { insideDiameter, length, roughness }, waterKinematicViscosity(waterTemperature))
-    return { ...loss, gradient: loss.headLoss / length, regime: regimeOf(loss.reynolds) }
+    const viscosity = waterKinematicViscosity(waterTemperature)
+    const pipe = { insideDiameter, length, roughness }
+    const { velocity, reynolds, frictionFactor, headLoss } = pipeLoss(flow, pipe, viscosity)
+    const gradient = headLoss / length
+    const regime = regimeOf(reynolds)
+    return frictionFactor === undefined
+      ? { velocity, reynolds, headLoss, gradient, regime }
+      : { velocity, reynolds, frictionFactor, headLoss, gradient, regime }
   },
   working(write, { waterTemperature }, { frictionFactor, reynolds, regime }) {
     const viscosity = {
