@@ -1,5 +1,5 @@
 import { Button } from '@radix-ui/themes'
-import { useDeferredValue, useEffect, useId, useMemo, useRef, useState, type ReactNode } from 'react'
+import { memo, useDeferredValue, useEffect, useId, useMemo, useRef, useState, type ReactNode } from 'react'
 import { calculator } from '#calc/index.ts'
 import { Working } from '../../components/Working.tsx'
 import { searchOf } from './address.ts'
@@ -36,6 +36,12 @@ interface State {
   /** The last form that could be worked out. */
   good: Form | undefined
 }
+
+/** Redrawn only when there are other numbers, not with every key. */
+const LiveDrawing = memo(function LiveDrawing({ id, solved }: { id: string; solved: Solved }) {
+  const Drawing = drawings[id]
+  return Drawing && <Drawing given={solved.inputs} found={solved.solution.outputs} />
+})
 
 /** A live calculator: the fields keep what is written; everything else is worked out from them as it is drawn. */
 export function Calculator({ id, preset, texts, show, headingLevel, onSettle, plot }: CalculatorProps) {
@@ -79,7 +85,6 @@ export function Calculator({ id, preset, texts, show, headingLevel, onSettle, pl
   const isStale = !attempt.solution
   const Heading = headingLevel ? (`h${headingLevel}` as const) : undefined
   const Subheading = `h${(headingLevel ?? 1) + 1}` as 'h2' | 'h3' | 'h4' | 'h5'
-  const Drawing = drawings[id]
   const homeless = Object.entries(errors).filter(([path]) => !definition.inputs[path.split('.')[0]!])
 
   return (
@@ -121,7 +126,7 @@ export function Calculator({ id, preset, texts, show, headingLevel, onSettle, pl
           {solved && (
             <div className={isStale ? 'stale' : undefined}>
               <Figures definition={definition} outputs={solved.solution.outputs} keys={keys} cautions={cautions} />
-              {Drawing && drawn && <Drawing given={drawn.inputs} found={drawn.solution.outputs} />}
+              {drawn && <LiveDrawing id={id} solved={drawn} />}
               <Lists definition={definition} outputs={solved.solution.outputs} keys={keys} />
               {drawn && plot?.(drawn)}
               <Subheading className="calculator-subheading">Working</Subheading>
