@@ -3,7 +3,6 @@ import { Injectable } from '@nestjs/common'
 import { ConfigService } from '@nestjs/config'
 import { and, desc, eq, isNull, sql } from 'drizzle-orm'
 import { draw } from '#calc/marking/draw.ts'
-import { mark } from '#calc/marking/mark.ts'
 import type { Question } from '#calc/marking/question.ts'
 import { viewOf } from '#calc/marking/view.ts'
 import type { School } from '#content/school.ts'
@@ -11,14 +10,12 @@ import { Refusal } from '../common/refusal.ts'
 import type { Environment } from '../config/environment.ts'
 import type { Database } from '../database/connection.ts'
 import { InjectDatabase } from '../database/inject-database.ts'
-import { attempts, type AttemptRow, type RoundResult } from '../database/schema/attempts.ts'
+import { attempts, type AttemptRow } from '../database/schema/attempts.ts'
 import { enrolments } from '../database/schema/courses.ts'
 import { InjectSchool } from '../school/school.module.ts'
 import type { User } from '../users/dto/user.schema.ts'
 import type { Answer, Attempt, StartAttempt } from './dto/attempt.schema.ts'
-
-/** A block handed in with this share of its marks counts as done. */
-const passShare = 0.6
+import { markRound } from './mark-round.ts'
 
 @Injectable()
 export class AttemptsService {
@@ -124,13 +121,6 @@ export class AttemptsService {
     if (!row) throw new Refusal('not-found', 'There is no such round of yours.')
     return row
   }
-}
-
-export function markRound({ questions, answers }: Pick<AttemptRow, 'questions' | 'answers'>): RoundResult {
-  const marked = questions.map((one) => [one.question.id, mark(one, answers[one.question.id])] as const)
-  const sum = (of: 'marks' | 'outOf') => marked.reduce((total, [, result]) => total + result[of], 0)
-  const [marks, outOf] = [sum('marks'), sum('outOf')]
-  return { marks, outOf, passed: marks >= passShare * outOf, questions: Object.fromEntries(marked) }
 }
 
 /** What the learner may see: the views of the questions, never their keys. */
