@@ -27,11 +27,11 @@ export const askedOutput = ({ calculator: id, ask }: Pick<Asked, 'calculator' | 
 /** Whether numbers of two quantities may stand for each other, as those of a head and a length. */
 const sameDimension = (a: Quantity, b: Quantity): boolean => conversion(a, quantities[b].si) !== undefined
 
-/** Reads what is written for a number or a choice of a calculator. Throws `CalculationError`. */
-export const readCell = (cell: Cell, written: PlainValue, field: string): PlainValue => {
+/** Reads what is written for a number or a choice of a calculator. Throws a RangeError that says what to write instead. */
+export const readCell = (cell: Cell, written: PlainValue): PlainValue => {
   if (cell.kind === 'choice') return written
   const reading = parse(String(written), cell.quantity)
-  if (!reading.ok) throw new CalculationError('not-finite', field, `${cell.label}: ${reading.message}`)
+  if (!reading.ok) throw new RangeError(`${cell.label}: ${reading.message}`)
   return reading.value
 }
 
@@ -47,16 +47,10 @@ export const wiring = (question: NumbersQuestion, part: Asked): Record<string, L
 export const unfold = (question: NumbersQuestion, literal: Literal): Literal =>
   typeof literal === 'string' && Object.hasOwn(question.fixed ?? {}, literal) ? question.fixed![literal]! : literal
 
-const resolveCell = (
-  question: NumbersQuestion,
-  cell: Cell,
-  literal: Literal,
-  named: Named,
-  field: string,
-): PlainValue => {
+const resolveCell = (question: NumbersQuestion, cell: Cell, literal: Literal, named: Named): PlainValue => {
   const written = unfold(question, literal)
   if (typeof written === 'object') throw new RangeError(`${cell.label} wants one value, not a list.`)
-  if (typeof written !== 'string' || !Object.hasOwn(named, written)) return readCell(cell, written, field)
+  if (typeof written !== 'string' || !Object.hasOwn(named, written)) return readCell(cell, written)
   const { value, quantity } = named[written]!
   if (cell.kind === 'choice' || !sameDimension(cell.quantity, quantity))
     throw new RangeError(`“${written}” is ${quantities[quantity].words} and cannot stand for ${cell.label}.`)
@@ -69,34 +63,28 @@ const isSet = (written: Literal | undefined): written is Record<string, PlainVal
 /** One number of a series, as a cell. */
 export const seriesCell = (input: Series): Cell => ({ ...input, kind: 'scalar', initial: undefined })
 
-const resolveInput = (
-  question: NumbersQuestion,
-  input: Input,
-  literal: Literal,
-  named: Named,
-  field: string,
-): InputValue => {
-  if (input.kind === 'scalar' || input.kind === 'choice') return resolveCell(question, input, literal, named, field)
-  const row = (columns: Columns, written: Literal, path: string): PlainRow => {
+const resolveInput = (question: NumbersQuestion, input: Input, literal: Literal, named: Named): InputValue => {
+  if (input.kind === 'scalar' || input.kind === 'choice') return resolveCell(question, input, literal, named)
+  const row = (columns: Columns, written: Literal): PlainRow => {
     if (!isSet(written)) throw new RangeError(`${input.label} wants its values by name.`)
     return Object.fromEntries(
       Object.entries(written).map(([name, value]) => {
         if (!Object.hasOwn(columns, name)) throw new RangeError(`${input.label} has no value called “${name}”.`)
-        return [name, resolveCell(question, columns[name]!, value, named, `${path}.${name}`)]
+        return [name, resolveCell(question, columns[name]!, value, named)]
       }),
     )
   }
   const written = unfold(question, literal)
-  if (input.kind === 'group') return row(input.columns, written, field)
+  if (input.kind === 'group') return row(input.columns, written)
   if (!Array.isArray(written)) throw new RangeError(`${input.label} wants a list.`)
-  if (input.kind === 'rows') return written.map((one, i) => row(input.columns, one, `${field}[${i}]`))
+  if (input.kind === 'rows') return written.map((one) => row(input.columns, one))
   const cell = seriesCell(input)
-  return written.map((one, i) => resolveCell(question, cell, one, named, `${field}[${i}]`) as number)
+  return written.map((one) => resolveCell(question, cell, one, named) as number)
 }
 
 /**
- * The inputs of a part's calculation, in SI; `changed` replaces some of them. Throws `CalculationError` for a value that cannot be read
- * and a RangeError where the bank names what there is not.
+ * The inputs of a part's calculation, in SI; `changed` replaces some of them. Throws a RangeError where the bank names what there is not
+ * or writes what cannot be read.
  */
 export const inputsOf = (
   question: NumbersQuestion,
@@ -108,7 +96,7 @@ export const inputsOf = (
   return Object.fromEntries(
     Object.entries({ ...wiring(question, part), ...changed }).map(([key, literal]) => {
       if (!Object.hasOwn(inputs, key)) throw new RangeError(`${title} has no input called “${key}”.`)
-      return [key, resolveInput(question, inputs[key]!, literal, named, key)]
+      return [key, resolveInput(question, inputs[key]!, literal, named)]
     }),
   )
 }
