@@ -41,6 +41,8 @@ export default defineConfig(({ isSsrBuild }) => ({
     emptyOutDir: true,
     copyPublicDir: !isSsrBuild,
     sourcemap: true,
+    // Fonts come from files: the content security policy knows no data: fonts.
+    assetsInlineLimit: 0,
     // One style sheet: a page rendered at build time then needs no list of its lazy parts' styles.
     cssCodeSplit: false,
     rolldownOptions: {

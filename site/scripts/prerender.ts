@@ -10,6 +10,8 @@ const bundle = (await import(join(built, 'site-server/entry-server.js'))) as {
 }
 
 const template = await readFile(join(built, 'site/index.html'), 'utf8')
+const emptyRoot = '<div id="root"></div>'
+if (!template.includes(emptyRoot)) throw new Error('dist/site is rendered already: build the site first.')
 await writeFile(join(built, 'site/shell.html'), template)
 
 /** React writes what belongs in the head before everything else. */
@@ -21,7 +23,7 @@ for (const path of paths) {
   const head = markup.match(headTags)![0]
   const page = template
     .replace('<title>Leatwright</title>', () => head)
-    .replace('<div id="root"></div>', () => `<div id="root">${markup.slice(head.length)}</div>`)
+    .replace(emptyRoot, () => `<div id="root">${markup.slice(head.length)}</div>`)
   const folder = join(built, 'site', path)
   await mkdir(folder, { recursive: true })
   await writeFile(join(folder, 'index.html'), page)

@@ -40,15 +40,19 @@ export function LongSection({ courses, current }: LongSectionProps) {
 
 const place = ({ x, y }: { x: number; y: number }) => ({ x, y })
 
+const StationWord = ({ label }: { label: (typeof stationLabels)[number] }) => (
+  <text className={label.inside ? 'section-label plain' : 'section-label'} {...place(label)}>
+    {label.text}
+  </text>
+)
+
 function Words() {
   return (
     <g textAnchor="middle">
       {stationLabels.map((label) => (
-        <text key={label.text} className="section-label" {...place(label)}>
-          {label.text}
-        </text>
+        <StationWord key={label.text} label={label} />
       ))}
-      <text className="section-label plain" x="600" y="100">
+      <text className="section-label plain rest" x="600" y="100">
         water at rest
       </text>
       <text className="section-label plain water" x="590" y="152">
@@ -96,9 +100,7 @@ export function SectionSlice({ course }: { course: number }) {
         {stationLabels
           .filter(({ slices }) => slices.includes(course))
           .map((label) => (
-            <text key={label.text} className="section-label" {...place(label)}>
-              {label.text}
-            </text>
+            <StationWord key={label.text} label={label} />
           ))}
         {course === 5 && (
           <text className="section-label plain loss" x="754" y="178">

@@ -12,7 +12,10 @@ export function Component() {
         title="Small hydro, sized and proved"
         description="Five courses for people who build small hydro, from the stream to the load. Every sum is live, shows its working, and takes your own numbers."
       />
-      <h1>Size it on paper. Prove it on your own stream.</h1>
+      <h1>
+        Size it on paper. <br />
+        Prove it on your own stream.
+      </h1>
       <p className="lead">
         Five courses for people who build small hydro, laid out the way the water runs. Every sum in them is live, shows
         its working, and takes your numbers.

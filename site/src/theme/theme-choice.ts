@@ -1,7 +1,7 @@
 import { useSyncExternalStore } from 'react'
 
 export const themeChoices = ['device', 'light', 'dark'] as const
-export type ThemeChoice = (typeof themeChoices)[number]
+type ThemeChoice = (typeof themeChoices)[number]
 
 /** public/theme.js reads the same name, before the first paint. */
 const storageKey = 'theme'
@@ -13,8 +13,7 @@ function readChoice(): ThemeChoice {
   return isChoice(stored) ? stored : 'device'
 }
 
-export function chooseTheme(choice: string) {
-  if (!isChoice(choice)) return
+export function chooseTheme(choice: ThemeChoice) {
   localStorage.setItem(storageKey, choice)
   window.dispatchEvent(new Event('themechoice'))
 }

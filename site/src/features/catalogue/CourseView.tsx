@@ -18,7 +18,12 @@ export function CourseView({ outline }: { outline: CourseOutline }) {
       </p>
       <h1>{outline.title}</h1>
       <p className="lead">{outline.summary}</p>
-      <LongSection courses={courses} current={outline.number} />
+      <div className="course-head">
+        <LongSection courses={courses} current={outline.number} />
+        <aside aria-label="Your place">
+          <EnrolPanel query={query} />
+        </aside>
+      </div>
       <div className="course-view">
         <StaffGauge done={query.data?.lessons.filter(({ done }) => done).length ?? 0} of={outline.lessons.length} />
         <section aria-labelledby="lessons">
@@ -26,7 +31,7 @@ export function CourseView({ outline }: { outline: CourseOutline }) {
           <p className="quiet">
             {open === outline.lessons.length
               ? `${open} lessons`
-              : `${open} of ${outline.lessons.length} lessons are open`}
+              : `${open} of ${outline.lessons.length} lessons open so far`}
             {minutes > 0 && `, ${minutes} minutes in all`}
           </p>
           <LessonList
@@ -35,9 +40,6 @@ export function CourseView({ outline }: { outline: CourseOutline }) {
             readable={query.data ? query.data.enrolled || query.data.price.amount === 0 : isPublic(outline)}
           />
         </section>
-        <aside aria-label="Your place">
-          <EnrolPanel query={query} />
-        </aside>
       </div>
     </>
   )

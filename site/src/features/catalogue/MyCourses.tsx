@@ -42,7 +42,7 @@ function MyCourse({ course }: { course: Course }) {
   const done = course.lessons.filter((lesson) => lesson.done).length
   return (
     <>
-      <StaffGauge done={done} of={course.lessons.length} />
+      <StaffGauge done={done} of={course.lessons.length} lies />
       <div>
         <p className="kicker">Course {course.number}</p>
         <h2>
