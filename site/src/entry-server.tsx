@@ -1,5 +1,5 @@
 import { StrictMode } from 'react'
-import { renderToString } from 'react-dom/server'
+import { prerender } from 'react-dom/static'
 import { createStaticHandler, createStaticRouter, StaticRouterProvider } from 'react-router-dom'
 import { App } from './App.tsx'
 import { createQueryClient } from './lib/query-client.ts'
@@ -14,7 +14,7 @@ export async function render(path: string) {
   if (context instanceof Response) throw new Error(`${path} answers with ${context.status}, not with a page.`)
   const failure: unknown = Object.values(context.errors ?? {})[0]
   if (failure) throw new Error(`${path} cannot be rendered.`, { cause: failure })
-  return renderToString(
+  const { prelude } = await prerender(
     <StrictMode>
       <App queryClient={createQueryClient()}>
         <StaticRouterProvider
@@ -24,5 +24,8 @@ export async function render(path: string) {
         />
       </App>
     </StrictMode>,
+    // What loads late is waited for, and none of it is put at the end with a script to move it: inline scripts are not allowed.
+    { progressiveChunkSize: Infinity },
   )
+  return new Response(prelude).text()
 }
