@@ -1,5 +1,5 @@
 import { useId, useState } from 'react'
-import { join, format } from '#calc/units/format.ts'
+import { format, join, say } from '#calc/units/format.ts'
 import { figures } from './figures.ts'
 import { Hatch, MovingDrawing } from './MovingDrawing.tsx'
 import { useNarrow } from './use-narrow.ts'
@@ -12,7 +12,7 @@ const top = 44
 const pixelsPerMetre = 8
 const stream = top + wholeFall * pixelsPerMetre
 
-const metres = (value: number) => join(format(value, 'head'))
+const metres = (value: number) => say(value, 'head')
 
 /** A shed on a hillside that can be set higher or lower: only the fall down to its jet counts. */
 export function FallToTheJet() {
@@ -25,17 +25,18 @@ export function FallToTheJet() {
 
   const width = narrow ? 288 : 640
   const crest = narrow ? 64 : 130
-  const foot = narrow ? 176 : 420
-  const rule = narrow ? 200 : 470
+  const foot = narrow ? 164 : 420
+  const rule = narrow ? 180 : 470
   const jetY = stream - over * pixelsPerMetre
   /** Where the hillside is as low as this. */
   const hillX = (y: number) => crest + ((y - top - 26) / (stream - top - 26)) * (foot - crest)
-  const shed = hillX(jetY + 16)
+  /** Dug into the bank, its front where the ground is. */
+  const shed = hillX(jetY + 14) - 38
 
   return (
     <MovingDrawing
       label="Height of the jet over the stream"
-      from={1}
+      from={2}
       to={15}
       step={0.5}
       value={over}
@@ -67,7 +68,7 @@ export function FallToTheJet() {
           stroke="var(--water-fill)"
           strokeWidth="4"
         />
-        <path d={`M${shed + 14} ${jetY + 12}L${foot} ${stream}`} stroke="var(--water)" strokeDasharray="3 5" />
+        <path d={`M${shed + 38} ${jetY + 12}L${foot} ${stream}`} stroke="var(--water)" strokeDasharray="3 5" />
         <g fill="var(--paper)">
           <path
             d={`M${shed - 10} ${jetY + 14}V${jetY - 22}L${shed + 14} ${jetY - 36}L${shed + 38} ${jetY - 22}V${jetY + 14}Z`}
@@ -100,7 +101,7 @@ export function FallToTheJet() {
       <text className="figure" x={rule + 12} y={(top + jetY) / 2 + 18}>
         {power}
       </text>
-      <text className="loss" x={rule + 12} y={(jetY + stream) / 2 + 5}>
+      <text className="loss" x={rule + 12} y={over < 5 ? jetY - 9 : (jetY + stream) / 2 + 5}>
         {metres(over)} lost
       </text>
     </MovingDrawing>

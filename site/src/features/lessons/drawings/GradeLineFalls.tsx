@@ -41,7 +41,7 @@ export function GradeLineFalls() {
       shows={`A pipe down a hill with its grade line. At ${litres} L/s the line falls ${metres(headLoss)} from forebay to nozzle, ${share} of the head, and ${metres(grossHead - headLoss)} is left.`}
       width={width}
       height={320}
-      caption="A pipe of 90 mm bore, 185 m long, with a drop of 30 m. Set the slider to 4, then 8, then 16 litres a second, and read off the loss each time."
+      caption="A pipe of 90 mm bore, 185 m long, with a drop of 30 m. The full line that falls from the dotted one is the grade line. Set the slider to 4, then 8, then 16 litres a second, and read off the loss each time."
     >
       <defs>
         <Hatch id={hatch} />

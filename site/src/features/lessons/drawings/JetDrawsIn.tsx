@@ -53,7 +53,7 @@ export function JetDrawsIn() {
       said={coefficient.toFixed(2)}
       shows={`A ${mouthWords(coefficient)}, 18 mm wide. The jet behind it is ${thickness} thick and carries ${litres}.`}
       width={width}
-      height={narrow ? 276 : 246}
+      height={narrow ? 240 : 246}
       caption="A mouth 18 mm wide under 37 m of net head. Only the way the metal leads the water in is changed."
     >
       <path d={`M0 ${wallTop}H${face}V${2 * middle - wallTop}H0Z`} fill="var(--water-fill)" />

@@ -42,7 +42,7 @@ export function JetThinsWithHead() {
       said={`${netHead} m`}
       shows={`A nozzle cut open. Under ${netHead} m of net head, 6.3 L/s leave at ${speed} in a jet ${thickness} thick that carries ${power}.`}
       width={width}
-      height={narrow ? 270 : 216}
+      height={narrow ? 240 : 216}
       caption="One tapered nozzle, always 6.3 L/s. The nozzle is bored anew for each head, so that the same water passes."
     >
       <path

@@ -27,7 +27,7 @@ interface Props extends SliderProps {
 export function MovingDrawing({ width, height, children, ...slider }: Props) {
   return (
     <WithSlider {...slider}>
-      <svg viewBox={`0 0 ${width} ${height}`} style={{ maxWidth: width * 1.25 }} role="img" aria-label={slider.shows}>
+      <svg viewBox={`0 0 ${width} ${height}`} style={{ maxWidth: width * 1.1 }} role="img" aria-label={slider.shows}>
         {children}
       </svg>
     </WithSlider>

@@ -1,5 +1,5 @@
 import { useId, useState } from 'react'
-import { format, join } from '#calc/units/format.ts'
+import { format, join, say } from '#calc/units/format.ts'
 import { figures } from './figures.ts'
 import { Hatch, MovingDrawing } from './MovingDrawing.tsx'
 import { useNarrow } from './use-narrow.ts'
@@ -8,7 +8,7 @@ const outside = 110
 const run = { flow: 0.0084, length: 185, roughness: 5e-5 }
 const longestBar = 8
 
-const millimetres = (value: number) => join(format(value / 1000, 'length', { unit: 'mm' }))
+const millimetres = (value: number) => say(value / 1000, 'length', 'mm')
 
 /** A pipe end-on: the number on its side stays, the wall grows inwards, the loss climbs. */
 export function OutsideAndInside() {

@@ -8,7 +8,6 @@ export const drawings: Record<string, ComponentType> = {
   'outside-and-inside': lazy(async () => ({ default: (await import('./OutsideAndInside.tsx')).OutsideAndInside })),
   'jet-thins-with-head': lazy(async () => ({ default: (await import('./JetThinsWithHead.tsx')).JetThinsWithHead })),
   'jet-draws-in': lazy(async () => ({ default: (await import('./JetDrawsIn.tsx')).JetDrawsIn })),
-  'bucket-and-jet': lazy(async () => ({ default: (await import('./BucketAndJet.tsx')).BucketAndJet })),
   'pitch-circle': lazy(async () => ({ default: (await import('./PitchCircle.tsx')).PitchCircle })),
   'what-the-gauge-shows': lazy(async () => ({ default: (await import('./WhatTheGaugeShows.tsx')).WhatTheGaugeShows })),
   'five-readings': lazy(async () => ({ default: (await import('./FiveReadings.tsx')).FiveReadings })),
