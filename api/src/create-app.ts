@@ -1,17 +1,16 @@
-import path from 'node:path'
 import { type DynamicModule, type LogLevel, RequestMethod } from '@nestjs/common'
 import { NestFactory } from '@nestjs/core'
 import type { NestExpressApplication } from '@nestjs/platform-express'
 import cookieParser from 'cookie-parser'
 import helmet from 'helmet'
 import { serveOpenApi } from './open-api.ts'
-import { projectRoot } from './project-root.ts'
+import { SITE_FOLDER } from './site-files/lesson-files.controller.ts'
 import { siteFiles } from './site-files/site-files.ts'
 
 /** The application of `AppModule`, ready to listen; the server and the tests make it alike. */
 export async function createApp(
   module: DynamicModule,
-  logger: LogLevel[] = ['log', 'warn', 'error', 'fatal'],
+  logger: LogLevel[] = ['warn', 'error', 'fatal'],
 ): Promise<NestExpressApplication> {
   const app = await NestFactory.create<NestExpressApplication>(module, {
     // Only JSON is read: no form of another site can send that.
@@ -25,7 +24,7 @@ export async function createApp(
   app.use(helmet({ contentSecurityPolicy: { useDefaults: false, directives: contentPolicy }, hsts: false }))
   app.use(cookieParser())
   app.useBodyParser('json', { limit: '256kb' })
-  app.use(siteFiles(path.join(projectRoot, 'dist/site')))
+  app.use(siteFiles(app.get<string>(SITE_FOLDER)))
   app.setGlobalPrefix('api', { exclude: [{ path: 'lessons/:course/:file', method: RequestMethod.GET }] })
   serveOpenApi(app)
   await app.init()

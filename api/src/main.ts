@@ -21,8 +21,12 @@ async function start() {
   }
   process.on('SIGTERM', stop)
   process.on('SIGINT', stop)
+  // The start command that this process belongs to is gone.
+  process.on('disconnect', stop)
 
   await app.listen(environment.PORT)
+  if (process.send) process.send('listening')
+  else console.log(`Leatwright takes requests at ${environment.PUBLIC_URL}`)
 }
 
 function fail(error: unknown): never {

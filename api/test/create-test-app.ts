@@ -35,14 +35,24 @@ export interface TestApp {
   close(): Promise<void>
 }
 
+export interface TestAppOptions {
+  /** Settings of the environment. */
+  settings?: Readonly<Record<string, string>>
+  /** More routes. */
+  controllers?: Type[]
+  /** A built site other than that in `dist/site/`. */
+  siteFolder?: string
+}
+
 /** Nothing listens there: mail stays in the outbox, where `newestMail` finds it. */
 const noMailServer = 'smtp://127.0.0.1:9'
 
 /** The whole application on an in-memory database with the shipped migrations, the courses and the demo accounts. */
-export async function createTestApp(
-  settings: Readonly<Record<string, string>> = {},
-  controllers: Type[] = [],
-): Promise<TestApp> {
+export async function createTestApp({
+  settings = {},
+  controllers = [],
+  siteFolder,
+}: TestAppOptions = {}): Promise<TestApp> {
   const environment = readEnvironment({
     NODE_ENV: 'test',
     SMTP_URL: noMailServer,
@@ -51,7 +61,7 @@ export async function createTestApp(
     ...settings,
   })
   const connection = await openTestDatabase()
-  const app = await createApp({ ...AppModule.forRoot(environment, connection), controllers }, [])
+  const app = await createApp({ ...AppModule.forRoot(environment, connection, siteFolder), controllers }, [])
   const { database } = connection
   let learners = 0
 

@@ -1,7 +1,7 @@
 import { Body, Controller, Delete, HttpCode, Post, Req, Res, UseGuards } from '@nestjs/common'
 import { ApiTags } from '@nestjs/swagger'
 import type { Request, Response } from 'express'
-import { Public, ReadsSession } from '../common/decorators/access.ts'
+import { AntiForgery, Public } from '../common/decorators/access.ts'
 import { Answers } from '../common/decorators/answers.ts'
 import { Refusal } from '../common/refusal.ts'
 import { AuthService } from './auth.service.ts'
@@ -25,7 +25,7 @@ import { TriesGuard } from './tries.guard.ts'
 
 @ApiTags('auth')
 @Controller('auth')
-@Public()
+@Public({ readsSession: false })
 export class AuthController {
   constructor(
     private readonly auth: AuthService,
@@ -61,7 +61,7 @@ export class AuthController {
   }
 
   @Post('session/refresh')
-  @ReadsSession()
+  @AntiForgery()
   @Answers(sessionSchema)
   async refresh(@Req() request: Request, @Res({ passthrough: true }) response: Response): Promise<Session> {
     const token = this.cookies.refreshToken(request)
@@ -74,7 +74,7 @@ export class AuthController {
   }
 
   @Delete('session')
-  @ReadsSession()
+  @AntiForgery()
   @HttpCode(204)
   async signOut(@Req() request: Request, @Res({ passthrough: true }) response: Response): Promise<void> {
     const token = this.cookies.refreshToken(request)

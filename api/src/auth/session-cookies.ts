@@ -2,8 +2,9 @@ import { Injectable } from '@nestjs/common'
 import { ConfigService } from '@nestjs/config'
 import type { CookieOptions, Request, Response } from 'express'
 import type { Environment } from '../config/environment.ts'
-import { accessSeconds, type SessionTokens, sessionSeconds } from './sessions.service.ts'
+import { type SessionTokens, sessionSeconds } from './sessions.service.ts'
 
+/** Outlives the token in it: a token that ran out is told from none at all, so that the site renews it. */
 const accessCookie = { name: 'leatwright_access', path: '/' }
 /** Sent only where it is used: refresh and sign-out. */
 const refreshCookie = { name: 'leatwright_refresh', path: '/api/auth/session' }
@@ -22,7 +23,7 @@ export class SessionCookies {
     response.cookie(accessCookie.name, tokens.access, {
       ...options,
       path: accessCookie.path,
-      maxAge: accessSeconds * 1000,
+      maxAge: sessionSeconds * 1000,
     })
     response.cookie(refreshCookie.name, tokens.refresh, {
       ...options,

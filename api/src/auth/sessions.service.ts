@@ -1,5 +1,5 @@
 import { Injectable } from '@nestjs/common'
-import { JwtService } from '@nestjs/jwt'
+import { JwtService, TokenExpiredError } from '@nestjs/jwt'
 import { Cron, CronExpression } from '@nestjs/schedule'
 import { and, eq, gt, inArray, isNull, lt } from 'drizzle-orm'
 import type { Database, Transaction } from '../database/connection.ts'
@@ -82,9 +82,11 @@ export class SessionsService {
   }
 
   /** Who holds this access token. The session is looked up, so that one that was ended is refused at once. */
-  async userOf(accessToken: string): Promise<User | undefined> {
-    const claims = await this.jwt.verifyAsync<AccessClaims>(accessToken).catch(() => undefined)
-    if (!claims) return undefined
+  async userOf(accessToken: string): Promise<User | 'expired' | undefined> {
+    const claims = await this.jwt
+      .verifyAsync<AccessClaims>(accessToken)
+      .catch((error: unknown) => (error instanceof TokenExpiredError ? 'expired' : undefined))
+    if (!claims || claims === 'expired') return claims
     const [user] = await this.database
       .select(userColumns)
       .from(sessions)

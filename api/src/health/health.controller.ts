@@ -16,7 +16,7 @@ export class HealthController {
 
   /** 503 while the database does not answer. */
   @Get()
-  @Public()
+  @Public({ readsSession: false })
   @Answers(healthSchema)
   async health(@Res({ passthrough: true }) response: Response): Promise<Health> {
     const ready = await this.database.execute(sql`select 1`).then(

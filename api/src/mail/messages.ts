@@ -1,3 +1,5 @@
+import { escapeHtml } from '../common/escape-html.ts'
+
 /** A mail in plain words, printed as text and as HTML from the same lines. */
 export interface Message {
   subject: string
@@ -29,9 +31,6 @@ function message({ subject, before, link, after }: Lines): Message {
     ].join('\n'),
   }
 }
-
-const escapeHtml = (text: string) =>
-  text.replaceAll('&', '&amp;').replaceAll('<', '&lt;').replaceAll('>', '&gt;').replaceAll('"', '&quot;')
 
 /** Nothing that was typed at sign-up stands in these: whoever typed it need not own the address. */
 export const confirmAddressMail = ({ link }: { link: string }) =>

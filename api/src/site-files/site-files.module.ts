@@ -1,6 +1,16 @@
-import { Module } from '@nestjs/common'
+import { type DynamicModule, Module } from '@nestjs/common'
+import { AuthModule } from '../auth/auth.module.ts'
 import { LessonAccessModule } from '../lesson-access/lesson-access.module.ts'
-import { LessonFilesController } from './lesson-files.controller.ts'
+import { LessonFilesController, SITE_FOLDER } from './lesson-files.controller.ts'
 
-@Module({ imports: [LessonAccessModule], controllers: [LessonFilesController] })
-export class SiteFilesModule {}
+@Module({})
+export class SiteFilesModule {
+  static forRoot(siteFolder: string): DynamicModule {
+    return {
+      module: SiteFilesModule,
+      imports: [AuthModule, LessonAccessModule],
+      controllers: [LessonFilesController],
+      providers: [{ provide: SITE_FOLDER, useValue: siteFolder }],
+    }
+  }
+}

@@ -1,6 +1,7 @@
 import path from 'node:path'
 import type { NextFunction, Request, RequestHandler, Response } from 'express'
 import express from 'express'
+import { Refusal } from '../common/refusal.ts'
 
 export const immutable = 'public, max-age=31536000, immutable'
 
@@ -28,7 +29,8 @@ export function siteFiles(siteFolder: string): RequestHandler {
     const sendPage = () => {
       const isPage = !path.extname(segments.at(-1) ?? '') && request.accepts('html')
       if (!isPage) {
-        next()
+        const nothing = new Refusal('not-found', 'There is nothing at this address.')
+        response.status(nothing.getStatus()).json(nothing.getResponse())
         return
       }
       response.setHeader('Cache-Control', 'no-cache')

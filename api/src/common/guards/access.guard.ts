@@ -2,7 +2,7 @@ import { type CanActivate, type ExecutionContext, Injectable } from '@nestjs/com
 import { Reflector } from '@nestjs/core'
 import { SessionCookies } from '../../auth/session-cookies.ts'
 import { SessionsService } from '../../auth/sessions.service.ts'
-import { ACCESS_RULE, type AccessRule, READS_SESSION } from '../decorators/access.ts'
+import { ACCESS_RULE, type AccessRule, ANTI_FORGERY } from '../decorators/access.ts'
 import type { RequestWithUser } from '../decorators/current-user.ts'
 import { notSignedIn, Refusal } from '../refusal.ts'
 
@@ -31,13 +31,17 @@ export class AccessGuard implements CanActivate {
 
     const mayReadCookies =
       harmless.has(request.method) || request.get(antiForgeryHeader.name) === antiForgeryHeader.value
-    const readsSession = rule.who !== 'anyone' || this.reflector.getAllAndOverride<boolean>(READS_SESSION, where)
-    if (readsSession && !mayReadCookies && this.cookies.areSent(request)) {
+    const needsHeader = rule.who !== 'anyone' || this.reflector.getAllAndOverride<boolean>(ANTI_FORGERY, where)
+    if (needsHeader && !mayReadCookies && this.cookies.areSent(request)) {
       throw new Refusal('anti-forgery', `Send the header ${antiForgeryHeader.name}: ${antiForgeryHeader.value}.`)
     }
 
+    if (rule.who === 'anyone' && !rule.readsSession) return true
     const accessToken = mayReadCookies ? this.cookies.accessToken(request) : undefined
-    request.user = accessToken ? await this.sessions.userOf(accessToken) : undefined
+    const user = accessToken ? await this.sessions.userOf(accessToken) : undefined
+    // Even where anyone is let in: answering as if nobody were signed in would hide what is theirs until the next renewal.
+    if (user === 'expired') throw notSignedIn()
+    request.user = user
     if (rule.who === 'anyone') return true
     if (!request.user) throw notSignedIn()
     if (rule.who === 'roles' && !rule.roles.includes(request.user.role)) {
