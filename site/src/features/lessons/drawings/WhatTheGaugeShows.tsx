@@ -11,7 +11,7 @@ const sections = [{ length: 196, insideDiameter: 0.09, roughness: 5e-5 }]
 
 const bar = (head: number) => (head * waterDensity(10) * g) / 1e5
 const sayBar = (head: number) => `${bar(head).toFixed(2)} bar`
-const metres = (value: number) => join(format(value, 'head', { digits: value < 1 ? 1 : 3 }))
+const metres = (value: number) => join(format(value, 'head', { digits: value < 1 ? 2 : 3 }))
 
 /** A gauge above the valve while the nozzle opens: the reading falls by what the pipe takes and by the head in the water's speed. */
 export function WhatTheGaugeShows() {
