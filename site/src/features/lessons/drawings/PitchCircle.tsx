@@ -39,7 +39,7 @@ export function PitchCircle() {
       said={`${millimetres} mm`}
       shows={`A runner of ${bucketCount} buckets seen along its shaft. The middle of the jet touches its pitch circle, ${millimetres} mm wide, ${jetsWide} times the jet. It turns at ${turns}.`}
       width={width}
-      height={narrow ? 366 : 284}
+      height={narrow ? 392 : 284}
       caption="The same jet, 24.5 m/s and 18 mm thick, on wheels of different width. The dotted circle is the pitch circle; the tips stand outside it."
     >
       <g fill="none" strokeWidth="2.5">
@@ -58,22 +58,17 @@ export function PitchCircle() {
         ))}
         <circle cx={x} cy={y} r={radius} stroke="var(--brass)" strokeWidth="2" strokeDasharray="2 5" />
         <circle cx={x} cy={y} r="7" fill="var(--ink)" />
-        <path
-          d={`M${x + 14} ${y}H${x + radius - 1}M${x + radius - 10} ${y - 6}l9 6l-9 6`}
-          stroke="var(--brass)"
-          strokeWidth="1.5"
-        />
       </g>
       <text className="water" x="2" y={jetY - jetWidth / 2 - 10}>
         jet
       </text>
-      <text className="electric" x={x + 16} y={y - 9}>
-        half of D
-      </text>
       <g transform={`translate(${words.x} ${words.y})`}>
-        <text className="figure">turns at {turns}</text>
-        <text y="26">{jetsWide} jets wide</text>
-        <text y="52">{bucketCount} buckets by Tygun’s rule</text>
+        <text className="electric">dotted circle {millimetres} mm</text>
+        <text className="figure" y="26">
+          turns at {turns}
+        </text>
+        <text y="52">{jetsWide} jets wide</text>
+        <text y="78">{bucketCount} buckets by Tygun’s rule</text>
       </g>
     </MovingDrawing>
   )
