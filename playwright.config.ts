@@ -36,6 +36,7 @@ export default defineConfig({
       DEMO: '1',
       NODE_ENV: 'test',
     },
+    reuseExistingServer: !process.env.CI,
     timeout: 240_000,
     gracefulShutdown: { signal: 'SIGTERM', timeout: 10_000 },
     stdout: 'ignore',
