@@ -9,6 +9,9 @@ const accessCookie = { name: 'leatwright_access', path: '/' }
 /** Sent only where it is used: refresh and sign-out. */
 const refreshCookie = { name: 'leatwright_refresh', path: '/api/auth/session' }
 
+/** Says to the site's own script only that there is a session here to ask for; it opens nothing. */
+const signedInCookie = { name: 'leatwright_signed_in', path: '/' }
+
 @Injectable()
 export class SessionCookies {
   private readonly options: CookieOptions
@@ -30,10 +33,17 @@ export class SessionCookies {
       path: refreshCookie.path,
       maxAge: sessionSeconds * 1000,
     })
+    response.cookie(signedInCookie.name, '1', {
+      ...options,
+      httpOnly: false,
+      path: signedInCookie.path,
+      maxAge: sessionSeconds * 1000,
+    })
   }
 
   clear(response: Response) {
-    for (const { name, path } of [accessCookie, refreshCookie]) response.clearCookie(name, { ...this.options, path })
+    for (const { name, path } of [accessCookie, refreshCookie, signedInCookie])
+      response.clearCookie(name, { ...this.options, path })
   }
 
   areSent(request: Request): boolean {

@@ -4,16 +4,23 @@ import { userSchema } from '#api/users/dto/user.schema.ts'
 import { apiClient, nothing } from './api-client.ts'
 import { hasCode } from './api-error.ts'
 
+/** The server leaves this cookie beside those of a session, which no script can read. Without it there is nobody to ask for. */
+const hasSession = () => document.cookie.split('; ').includes('leatwright_signed_in=1')
+
 export const sessionQueries = {
   /** The person signed in; null when nobody is. */
   me: () =>
     queryOptions({
       queryKey: ['me'],
-      queryFn: () =>
-        apiClient.get('/api/users/me', userSchema).catch((error: unknown) => {
+      queryFn: async () => {
+        if (!hasSession()) return null
+        try {
+          return await apiClient.get('/api/users/me', userSchema)
+        } catch (error) {
           if (hasCode(error, 'not-signed-in')) return null
           throw error
-        }),
+        }
+      },
     }),
 }
 

@@ -2,6 +2,7 @@ import { Button } from '@radix-ui/themes'
 import { useId, useRef, useState, type FormEvent } from 'react'
 import type { Quantity } from '#calc/index.ts'
 import { quantities } from '#calc/units/quantities.ts'
+import { UntilReady } from '../components/UntilReady.tsx'
 import { MathSymbol } from '../components/Formula.tsx'
 import { checkBlank, type Check } from './blank.ts'
 
@@ -51,30 +52,32 @@ export function Blank({ label, symbol, quantity, answer, shown, onFilled }: Blan
       <label htmlFor={id}>
         {label} {symbol && <MathSymbol tex={symbol} />}
       </label>
-      <div className="blank-line">
-        <input
-          ref={input}
-          id={id}
-          className={wrong ? 'blank-wrong' : undefined}
-          value={text}
-          onChange={(event) => setText(event.target.value)}
-          readOnly={isOver}
-          autoComplete="off"
-          spellCheck={false}
-          aria-describedby={`${id}-unit ${id}-said`}
-          aria-invalid={wrong ? true : undefined}
-        />
-        {!isOver && (
-          <Button type="submit" size="3" variant="outline">
-            Check
-          </Button>
-        )}
-        {!isOver && tries >= triesBeforeShowing && (
-          <Button type="button" size="3" variant="outline" color="gray" onClick={show}>
-            Show me
-          </Button>
-        )}
-      </div>
+      <UntilReady>
+        <div className="blank-line">
+          <input
+            ref={input}
+            id={id}
+            className={wrong ? 'blank-wrong' : undefined}
+            value={text}
+            onChange={(event) => setText(event.target.value)}
+            readOnly={isOver}
+            autoComplete="off"
+            spellCheck={false}
+            aria-describedby={`${id}-unit ${id}-said`}
+            aria-invalid={wrong ? true : undefined}
+          />
+          {!isOver && (
+            <Button type="submit" size="3" variant="outline">
+              Check
+            </Button>
+          )}
+          {!isOver && tries >= triesBeforeShowing && (
+            <Button type="button" size="3" variant="outline" color="gray" onClick={show}>
+              Show me
+            </Button>
+          )}
+        </div>
+      </UntilReady>
       <p className="blank-help" id={`${id}-unit`}>
         {quantities[quantity].units.some(({ name }) => name === '')
           ? `A number, such as ${quantities[quantity].example}.`

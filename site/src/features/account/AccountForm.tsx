@@ -4,6 +4,7 @@ import { useMutation, type UseMutationOptions } from '@tanstack/react-query'
 import { useId } from 'react'
 import { useForm, type DefaultValues, type FieldErrors, type FieldValues, type Path } from 'react-hook-form'
 import type { z } from 'zod'
+import { UntilReady } from '../../components/UntilReady.tsx'
 import { ErrorCallout } from '../../components/ErrorCallout.tsx'
 import { ApiError } from '../../lib/api-error.ts'
 import './account.css'
@@ -50,13 +51,15 @@ export function AccountForm<T extends FieldValues, Answer>(props: AccountFormPro
 
   return (
     <form className="account-form" noValidate onSubmit={(event) => void handleSubmit(send)(event)}>
-      {fields.map((field) => (
-        <Field key={field.name} field={field} errors={formState.errors} input={register(field.name)} />
-      ))}
-      {mutation.isError && <ErrorCallout title={failure} error={mutation.error} />}
-      <Button type="submit" size="3" loading={mutation.isPending}>
-        {submit}
-      </Button>
+      <UntilReady>
+        {fields.map((field) => (
+          <Field key={field.name} field={field} errors={formState.errors} input={register(field.name)} />
+        ))}
+        {mutation.isError && <ErrorCallout title={failure} error={mutation.error} />}
+        <Button type="submit" size="3" loading={mutation.isPending}>
+          {submit}
+        </Button>
+      </UntilReady>
     </form>
   )
 }

@@ -1,6 +1,7 @@
 import { Button } from '@radix-ui/themes'
 import { memo, useDeferredValue, useEffect, useId, useMemo, useRef, useState, type ReactNode } from 'react'
 import { calculator } from '#calc/index.ts'
+import { UntilReady } from '../../components/UntilReady.tsx'
 import { Working } from '../../components/Working.tsx'
 import { searchOf } from './address.ts'
 import './calculators.css'
@@ -102,13 +103,15 @@ export function Calculator({ id, preset, texts, show, headingLevel, onSettle, pl
       )}
       <div className="calculator-columns">
         <form className="calculator-fields" onSubmit={(event) => event.preventDefault()} noValidate>
-          <InputFields definition={definition} form={form} errors={errors} cautions={cautions} change={change} />
-          <div className="calculator-actions no-print">
-            <CopyLink path={() => `/calculators/${id}${searchOf(definition, form)}`} />
-            <Button type="button" size="3" variant="outline" onClick={() => put(startForm(definition, preset))}>
-              Start again
-            </Button>
-          </div>
+          <UntilReady>
+            <InputFields definition={definition} form={form} errors={errors} cautions={cautions} change={change} />
+            <div className="calculator-actions no-print">
+              <CopyLink path={() => `/calculators/${id}${searchOf(definition, form)}`} />
+              <Button type="button" size="3" variant="outline" onClick={() => put(startForm(definition, preset))}>
+                Start again
+              </Button>
+            </div>
+          </UntilReady>
         </form>
         <div className="calculator-answers">
           {homeless.map(([path, message]) => (

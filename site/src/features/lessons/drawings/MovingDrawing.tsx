@@ -1,3 +1,4 @@
+import { UntilReady } from '../../../components/UntilReady.tsx'
 import { useId, type ReactNode } from 'react'
 import './drawings.css'
 
@@ -54,16 +55,18 @@ export function WithSlider({
       <div className="moving-drawing-slider">
         <label htmlFor={id}>{label}</label>
         <output htmlFor={id}>{said}</output>
-        <input
-          id={id}
-          type="range"
-          min={from}
-          max={to}
-          step={step}
-          value={value}
-          aria-valuetext={`${said}. ${shows}`}
-          onChange={(event) => onChange(event.currentTarget.valueAsNumber)}
-        />
+        <UntilReady>
+          <input
+            id={id}
+            type="range"
+            min={from}
+            max={to}
+            step={step}
+            value={value}
+            aria-valuetext={`${said}. ${shows}`}
+            onChange={(event) => onChange(event.currentTarget.valueAsNumber)}
+          />
+        </UntilReady>
       </div>
       <p className="moving-drawing-caption">{caption}</p>
     </div>
