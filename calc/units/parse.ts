@@ -12,45 +12,100 @@ export type Reading =
 type Refusal = Extract<Reading, { ok: false }>
 const refuse = (code: Refusal['code'], message: string): Refusal => ({ ok: false, code, message })
 
-/** Ways of writing a unit that the unit library does not know, lower case and without spaces. */
+/** Names and short forms that the unit library does not know, lower case and without spaces. */
 const otherSpellings = new Map<string, string>(
   Object.entries({
     lps: 'L/s',
-    ltr: 'L',
-    ltrs: 'L',
-    litre: 'L',
-    litres: 'L',
-    liter: 'L',
-    liters: 'L',
     lpm: 'L/min',
-    cumecs: 'm³/s',
     cumec: 'm³/s',
+    cumecs: 'm³/s',
+    cfs: 'ft³/s',
+    cusec: 'ft³/s',
+    cusecs: 'ft³/s',
+    mps: 'm/s',
+    kph: 'km/h',
+    kmh: 'km/h',
     rpm: 'rev/min',
     'r/min': 'rev/min',
-    'rev/min': 'rev/min',
     'revs/min': 'rev/min',
+    'turns/min': 'rev/min',
+    '/min': 'rev/min',
     '1/min': 'rev/min',
+    'revs/s': 'rev/s',
+    'turns/s': 'rev/s',
+    '/s': 'rev/s',
+    '1/s': 'rev/s',
     deg: '°',
     degree: '°',
     degrees: '°',
+    º: '°',
     c: '°C',
     degc: '°C',
+    ºc: '°C',
     celsius: '°C',
     f: '°F',
     degf: '°F',
+    ºf: '°F',
+    fahrenheit: '°F',
     percent: '%',
     pct: '%',
-    metre: 'm',
-    metres: 'm',
-    meters: 'm',
-    watts: 'W',
-    bars: 'bar',
-    inch: 'in',
+    barg: 'bar',
+    'bar(g)': 'bar',
+    'lb/in2': 'psi',
+    'lbf/in2': 'psi',
+    "'": 'ft',
+    '’': 'ft',
+    '′': 'ft',
     '"': 'in',
+    '”': 'in',
+    '″': 'in',
+    cp: 'mPa·s',
+    cst: 'mm²/s',
+    kwhr: 'kWh',
+    kwhrs: 'kWh',
+    'm/100m': 'm per 100 m',
   }),
 )
 
-/** As the unit library spells it: m³/s and m3/s become m^3/s, sec becomes s. */
+const prefixes: Record<string, string> = { '': '', milli: 'm', centi: 'c', deci: 'd', kilo: 'k', mega: 'M' }
+const unitWords: Record<string, string> = {
+  metre: 'm',
+  meter: 'm',
+  mtr: 'm',
+  litre: 'L',
+  liter: 'L',
+  ltr: 'L',
+  watt: 'W',
+  pascal: 'Pa',
+  bar: 'bar',
+  second: 's',
+  sec: 's',
+  minute: 'min',
+  min: 'min',
+  hour: 'h',
+  hr: 'h',
+  inch: 'in',
+  inche: 'in',
+  foot: 'ft',
+  feet: 'ft',
+}
+const unitWord = new RegExp(`\\b(milli|centi|deci|kilo|mega|)(${Object.keys(unitWords).join('|')})s?\\b`, 'gi')
+
+/** Words as signs: "litres per second" is L/s, "square metres" m^2, "m s-1" m/s. */
+const asSigns = (text: string): string =>
+  text
+    .replace(/ℓ/g, 'L')
+    .replace(/\bper\s+cent\b/gi, '%')
+    .replace(
+      unitWord,
+      (_, prefix: string, word: string) => prefixes[prefix.toLowerCase()]! + unitWords[word.toLowerCase()]!,
+    )
+    .replace(/\b(?:square|sq\.?)\s+([a-z]+)/gi, '$1^2')
+    .replace(/\b(?:cubic|cu\.?)\s+([a-z]+)/gi, '$1^3')
+    .replace(/\s*[·⋅]?\s*(min|s|h)(?:\^?-1|⁻¹)$/, '/$1')
+    .replace(/\s*(?:\bper\b|\/)\s*/gi, '/')
+
+/** As the unit library spells it: m³/s and m3/s become m^3/s, min becomes minute. */
 const librarySpelling = (text: string): string =>
   text
     .replace(/³/g, '^3')
@@ -58,47 +113,71 @@ const librarySpelling = (text: string): string =>
     .replace(/([a-zA-Z])([23])(?![0-9])/g, '$1^$2')
     .replace(/[·⋅*]/g, ' ')
     .replace(/[µμ]/g, 'u')
-    .replace(/\/(sec|second|seconds)$/i, '/s')
-    .replace(/\/(min|mins|minutes)$/i, '/minute')
-    .replace(/\/(h|hr|hrs|hours)$/i, '/hour')
-    .replace(/^(litres?|liters?|ltrs?)(?=\/)/i, 'L')
-    .replace(/ per /i, '/')
+    .replace(/\bmin\b/gi, 'minute')
+    .replace(/\bh\b/g, 'hour')
 
 const squeeze = (text: string): string => text.toLowerCase().replace(/\s+/g, '')
 
-const findUnit = (text: string, quantity: Quantity): UnitName | undefined => {
-  const { units, si } = quantities[quantity]
-  const known = [...units, si]
-  const written = text.replace(/\s*\/\s*/g, '/').trim()
-  const exact = known.find((unit) => unit.name === written)
-  if (exact) return exact
-  const spelling = otherSpellings.get(squeeze(written)) ?? written
-  const loosely = known.find((unit) => squeeze(unit.name) === squeeze(spelling))
-  const mathjs = librarySpelling(spelling)
-  // "mW" and "MW" differ: an exact spelling of the unit library goes before one that is right but for capitals.
-  if (isUnit(mathjs) && conversion(quantity, { name: spelling, mathjs })) return { name: spelling, mathjs }
-  if (loosely) return loosely
-  const byLibrary = known.find((unit) => unit.mathjs !== undefined && squeeze(unit.mathjs) === squeeze(mathjs))
-  if (byLibrary) return byLibrary
-  return isUnit(mathjs.toLowerCase()) && conversion(quantity, { name: spelling, mathjs: mathjs.toLowerCase() })
-    ? { name: spelling, mathjs: mathjs.toLowerCase() }
-    : undefined
+/** How a unit is spelled here, whichever way it was written. */
+const spell = (written: string): string => {
+  const signs = asSigns(written)
+  return otherSpellings.get(squeeze(written)) ?? otherSpellings.get(squeeze(signs)) ?? signs
 }
 
-const digit = /[0-9]/
+const isSameUnit = (quantity: Quantity, one: UnitName, other: UnitName): boolean => {
+  const [a, b] = [conversion(quantity, one), conversion(quantity, other)]
+  return a !== undefined && b !== undefined && a.toSi(1) === b.toSi(1) && a.toSi(0) === b.toSi(0)
+}
+
+const findUnit = (written: string, quantity: Quantity): UnitName | undefined => {
+  const { units, si } = quantities[quantity]
+  const known = [...units, si]
+  const spelling = spell(written)
+  const exact = known.find(({ name }) => name === written) ?? known.find(({ name }) => name === spelling)
+  if (exact) return exact
+  /** The unit library's, under the name that it has here, if it has one. */
+  const fromLibrary = (mathjs: string): UnitName | undefined => {
+    const unit = { name: spelling, mathjs }
+    if (!isUnit(mathjs) || !conversion(quantity, unit)) return undefined
+    return known.find((one) => isSameUnit(quantity, one, unit)) ?? unit
+  }
+  const mathjs = librarySpelling(spelling)
+  // "mW" and "MW" differ: an exact spelling goes before one that is right but for capitals.
+  return (
+    fromLibrary(mathjs) ??
+    known.find(({ name }) => squeeze(name) === squeeze(spelling)) ??
+    known.find((unit) => unit.mathjs !== undefined && squeeze(unit.mathjs) === squeeze(mathjs)) ??
+    fromLibrary(mathjs.toLowerCase())
+  )
+}
+
+const superscripts = '⁰¹²³⁴⁵⁶⁷⁸⁹'
+
+/** 10⁻³ as 10^-3. */
+const plainPowers = (text: string): string =>
+  text.replace(
+    /10(⁻?)([⁰¹²³⁴-⁹]+)/,
+    (_, minus: string, power: string) => `10^${minus && '-'}${[...power].map((c) => superscripts.indexOf(c)).join('')}`,
+  )
+
+/** Sign; digits, perhaps grouped in threes by spaces or apostrophes, with points and commas; perhaps a power of ten. */
+const numberPattern =
+  /^[=~≈]?\s*([+\-−]?)\s*((?:\d{1,3}(?:[ \u00a0\u202f\u2009'’]\d{3})+(?!\d)|\d*)(?:[.,]\d+)*[.,]?)(?:\s*(?:e|[×x·*]\s*10\s*(?:\^|(?=[+\-−])))\s*([+\-−]?\s*\d+))?/i
+
+/** What cannot follow a number: more of it, or the rest of a fraction, a clock time, feet and inches. */
+const moreNumber = /^\s*['’′/:x×]?\s*\d(?!\s*\/\s*[a-z])/i
 
 /**
  * The number at the start of a text, however its writer groups and points it: 9,5 · 9.5 · 1 450 · 1,450.5 · 1.450,5 · 2e-3.
  * A lone comma before three digits can be read two ways and is refused.
  */
 const readNumber = (text: string, example: string): { value: number; figures: number; rest: string } | Refusal => {
-  const found =
-    /^([+\-−]?)\s*((?:\d[\d \u00a0\u202f\u2009'’]*)?(?:[.,]?\d[\d \u00a0\u202f\u2009]*)*)((?:\s*[e×x]\s*(?:10\s*\^?\s*)?[+\-−]?\s*\d+)?)/i.exec(
-      text,
-    )
-  const body = found?.[2]?.trim() ?? ''
-  if (!found || !digit.test(body)) return refuse('no-number', `Start with a number, for example ${example}.`)
-  const compact = body.replace(/[\s\u00a0\u202f\u2009'’]/g, '')
+  const [whole, sign, body = '', power = '0'] = numberPattern.exec(text) ?? ['']
+  if (!/\d/.test(body)) return refuse('no-number', `Start with a number, for example ${example}.`)
+  const notOne = refuse('no-number', `“${text.slice(0, 40)}” is not one number: write it like ${example}.`)
+  const rest = text.slice(whole.length)
+  if (moreNumber.test(rest)) return notOne
+  const compact = body.replace(/[ \u00a0\u202f\u2009'’]/g, '')
   const commas = compact.split(',').length - 1
   const dots = compact.split('.').length - 1
   let plain: string
@@ -112,14 +191,16 @@ const readNumber = (text: string, example: string): { value: number; figures: nu
     plain = compact.replace(',', '.')
   } else if (/^\d{1,3}(,\d{3})+(\.\d*)?$/.test(compact)) plain = compact.replace(/,/g, '')
   else if (/^\d{1,3}(\.\d{3})+(,\d*)?$/.test(compact)) plain = compact.replace(/\./g, '').replace(',', '.')
-  else return refuse('no-number', `“${body}” is not one number: write it like ${example}.`)
-  const power = /[+\-−]?\s*\d+$/.exec(found[3]!)?.[0].replace('−', '-').replace(/\s/g, '') ?? '0'
-  const value = Number(`${plain}e${power}`) * (found[1] === '-' || found[1] === '−' ? -1 : 1)
-  return { value, figures: figuresIn(plain), rest: text.slice(found[0].length).trim() }
+  else return notOne
+  const size = Number(`${plain}e${power.replace('−', '-').replace(/\s/g, '')}`)
+  return { value: sign === '-' || sign === '−' ? -size : size, figures: figuresIn(plain), rest }
 }
 
 /** Significant figures of a number as it was written; zeros at the end of a whole number are counted. */
 const figuresIn = (plain: string): number => plain.replace('.', '').replace(/^0+/, '').length || 1
+
+/** A gallon is a US or an imperial one; the unit library would take the first without asking. */
+const gallons = /\b(gal|gals|gallons?|gpm|gpd)\b/i
 
 /**
  * Reads what a person typed for a quantity: "9,5 l/s", "0.0095 m3/s", "110mm", "1 450 rpm". A number without a unit takes `unit`;
@@ -127,29 +208,37 @@ const figuresIn = (plain: string): number => plain.replace('.', '').replace(/^0+
  */
 export const parse = (text: string, quantity: Quantity, unit?: string): Reading => {
   const { words, example } = quantities[quantity]
-  const trimmed = text.trim()
+  const trimmed = plainPowers(text.trim())
   if (trimmed === '') return refuse('empty', `Write ${words}, for example ${example}.`)
   const number = readNumber(trimmed, example)
   if ('ok' in number) return number
   if (!Number.isFinite(number.value))
     return refuse('no-number', `That number is too large to work with. Write ${words} like ${example}.`)
 
-  const unitText = number.rest === '' ? unit : number.rest
-  const chosen = unitText === undefined ? unitless(quantity) : findUnit(unitText, quantity)
-  if (chosen) {
+  const rest = number.rest.replace(/[.,;]?\s*$/, '').trim()
+  const written = rest === '' ? unit : rest
+  const chosen = written === undefined ? unitless(quantity) : findUnit(written, quantity)
+  if (chosen && !gallons.test(chosen.name)) {
     const value = conversion(quantity, chosen)!.toSi(number.value)
     return { ok: true, value, unit: chosen.name, figures: number.figures }
   }
-  if (unitText === undefined) return refuse('no-unit', `Say the unit too, for example ${example}.`)
-  const spelling = librarySpelling(otherSpellings.get(squeeze(unitText)) ?? unitText)
-  if (isUnit(spelling)) {
-    const meant = quantityOf(spelling)
+  if (written === undefined) return refuse('no-unit', `Say the unit too, for example ${example}.`)
+  if (gallons.test(written))
     return refuse(
-      'wrong-quantity',
-      `${meant ? `“${unitText}” measures ${quantities[meant].words.replace(/^an? /, '')}` : `“${unitText}” does not measure this`}; ${words} is wanted, for example ${example}.`,
+      'unknown-unit',
+      `A gallon is 3.785 L in one country and 4.546 L in another: write ${words} like ${example}.`,
     )
-  }
-  return refuse('unknown-unit', `The unit “${unitText}” is not known here; write ${words} like ${example}.`)
+  const spelling = librarySpelling(spell(written))
+  if (!isUnit(spelling))
+    return refuse(
+      'unknown-unit',
+      `The unit “${written.slice(0, 40)}” is not known here; write ${words} like ${example}.`,
+    )
+  const meant = quantityOf(spelling)
+  const measures = meant
+    ? `“${written}” measures ${quantities[meant].words.replace(/^an? /, '')}`
+    : `“${written}” does not measure this`
+  return refuse('wrong-quantity', `${measures}; ${words} is wanted, for example ${example}.`)
 }
 
 const unitless = (quantity: Quantity): UnitName | undefined =>

@@ -184,6 +184,7 @@ export const quantities: Readonly<Record<Quantity, QuantityInfo>> = {
     units: [
       { name: 'm per 100 m', factor: 0.01 },
       { name: 'm/m', factor: 1 },
+      { name: '%', factor: 0.01 },
     ],
     example: '1.6 m per 100 m',
   },
@@ -242,9 +243,10 @@ const make = (si: UnitName, unit: UnitName): Conversion | undefined => {
   const zero = math.unit(0, from).toNumber(to)
   const one = math.unit(1, from).toNumber(to)
   if (zero === 0) return linear(one)
+  // A scale with another zero: the noise is that of the difference.
   return {
-    toSi: (value) => math.unit(value, from).toNumber(to),
-    fromSi: (value) => math.unit(value, to).toNumber(from),
+    toSi: (value) => Number(math.unit(value, from).toNumber(to).toPrecision(12)),
+    fromSi: (value) => Number(math.unit(value, to).toNumber(from).toPrecision(12)),
   }
 }
 
