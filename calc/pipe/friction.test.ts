@@ -211,7 +211,7 @@ describe('friction', () => {
       const { outputs, working } = solve('friction', { ...pipe, flow })
       expect(outputs).toMatchObject({ headLoss: 0, gradient: 0, regime: 'laminar' })
       expect(outputs).not.toHaveProperty('frictionFactor')
-      expect(working.at(-1)!.say).toContain('stands still')
+      expect(working.map(({ say }) => say).join(' ')).toContain('stands still')
     }
   })
 

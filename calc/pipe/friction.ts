@@ -77,8 +77,18 @@ export const friction = defineCalculator({
       formula: write`${'velocity'} = \frac{4 \, ${'flow'}}{\pi \, ${'insideDiameter'}^2}`,
       gives: 'velocity' as const,
     }
+    const stirring = {
+      say: 'The Reynolds number tells smooth flow from turbulent flow.',
+      formula: write`${'reynolds'} = \frac{${'velocity'} \, ${'insideDiameter'}}{${viscosity}}`,
+      gives: 'reynolds' as const,
+    }
+    const slope = {
+      say: 'Spread over the length it is the slope of the hydraulic grade line.',
+      formula: write`${'gradient'} = \frac{${'headLoss'}}{${'length'}}`,
+      gives: 'gradient' as const,
+    }
     if (frictionFactor === undefined)
-      return [speed, { say: 'Water that stands still loses no head.', gives: 'headLoss' as const }]
+      return [speed, stirring, { say: 'Water that stands still loses no head.', gives: 'headLoss' as const }, slope]
     const joined = {
       symbol: '(f\\,\\mathrm{Re}^2)_{\\text{join}}',
       value: frictionFactor * reynolds ** 2,
@@ -86,11 +96,7 @@ export const friction = defineCalculator({
     }
     return [
       speed,
-      {
-        say: 'The Reynolds number tells smooth flow from turbulent flow.',
-        formula: write`${'reynolds'} = \frac{${'velocity'} \, ${'insideDiameter'}}{${viscosity}}`,
-        gives: 'reynolds',
-      },
+      stirring,
       regime === 'laminar'
         ? {
             say: `Up to ${laminarTo} the flow is laminar, and the wall's roughness does not count.`,
@@ -113,11 +119,7 @@ export const friction = defineCalculator({
         formula: write`${'headLoss'} = ${'frictionFactor'} \, \frac{${'length'}}{${'insideDiameter'}} \, \frac{${'velocity'}^2}{2 \, ${gravity}}`,
         gives: 'headLoss',
       },
-      {
-        say: 'Spread over the length it is the slope of the hydraulic grade line.',
-        formula: write`${'gradient'} = \frac{${'headLoss'}}{${'length'}}`,
-        gives: 'gradient',
-      },
+      slope,
     ]
   },
   cautions: ({ insideDiameter, roughness }, { velocity, frictionFactor, regime }) => [
