@@ -6,13 +6,16 @@ import type { Answer } from './mark.ts'
 import type { Part } from './question.ts'
 import { leftId, placeId } from './view.ts'
 
+/** Closer than any tolerance, and as a person would write it. */
+const digits = 5
+
 /** The answer that gets full marks, as a learner would give it: for demonstration data, tests and figures. */
 export const rightAnswer = ({ question, answers, shuffle }: Draw): Answer => {
   const placeOf = (item: number) => placeId(shuffle.indexOf(item))
   const text = (part: Part) => {
     const { quantity } = askedOutput(part)
     const unit = part.units?.[0] ?? quantities[quantity].units[0]!.name
-    return `${fieldText(answers[part.id]!, quantity, unit)} ${unit}`
+    return `${fieldText(Number(answers[part.id]!.toPrecision(digits)), quantity, unit)} ${unit}`
   }
   switch (question.kind) {
     case 'number':

@@ -16,6 +16,7 @@ test('a calculator takes what people type, says what is wrong, and its address c
   await expect(page.getByLabel(/^Inside diameter/)).toHaveAttribute('aria-invalid', 'true')
   await page.getByLabel(/^Inside diameter/).fill('102.2')
 
+  await expect(page).toHaveURL(/insideDiameter=102\.2/)
   await page.goto(page.url())
   await expect(page.getByText('1.52 m/s').filter({ visible: true }).first()).toBeVisible()
 

@@ -123,7 +123,7 @@ function PartView({ part, say, given }: PartViewProps) {
           <dt>Your answer</dt>
           <dd>
             <Lines lines={given.length > 0 ? given : ['none']} />
-            {part.readAs && <span className="quiet">read as {part.readAs}</span>}
+            {part.readAs && <span className="quiet">{part.readAs}</span>}
           </dd>
         </div>
         {part.verdict !== 'full' && part.answer.length > 0 && (
