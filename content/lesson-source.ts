@@ -18,10 +18,8 @@ export const lessonComponents = [
   'WorkedExample',
   'FadedExample',
   'Row',
-  'Group',
   'Plot',
   'Drawing',
-  'Figure',
   'Caution',
   'FromTheTrade',
   'Source',
@@ -82,7 +80,11 @@ const parseLesson = (source: string): Root => {
     return parser.parse(source)
   } catch (error) {
     if (!(error instanceof VFileMessage)) throw error
-    throw new LessonSourceError([{ line: error.line ?? 1, column: error.column ?? 1, message: error.reason }])
+    // A tag that is never closed has its place only in the words: "(10:1-10:24)".
+    const [, line, column] = /\((\d+):(\d+)/.exec(error.reason) ?? []
+    throw new LessonSourceError([
+      { line: error.line ?? Number(line ?? 1), column: error.column ?? Number(column ?? 1), message: error.reason },
+    ])
   }
 }
 
