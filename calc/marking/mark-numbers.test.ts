@@ -274,15 +274,13 @@ describe('for every draw, unit and way of writing', () => {
         return `${comma && !/\.\d{3}$/.test(text) ? text.replace('.', ',') : text}${unit === '' ? '' : space + unit}`
       }),
     )
-  const cases = fc
-    .constantFrom(...questions)
-    .chain((question) =>
-      fc.record({
-        question: fc.constant(question),
-        seed: fc.string(),
-        unit: fc.constantFrom(...unitsOf(askedOutput(question).quantity)),
-      }),
-    )
+  const cases = fc.constantFrom(...questions).chain((question) =>
+    fc.record({
+      question: fc.constant(question),
+      seed: fc.string(),
+      unit: fc.constantFrom(...unitsOf(askedOutput(question).quantity)),
+    }),
+  )
   const runs = { numRuns: process.env.DEEP ? 3000 : 300 }
 
   test('the right answer with enough digits gets full marks', () => {
