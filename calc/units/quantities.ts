@@ -1,5 +1,5 @@
-import { create, createUnitDependencies, unitDependencies } from 'mathjs'
 import type { Quantity } from '../definition.ts'
+import { libraryUnit } from './unit-library.ts'
 
 /** A unit as people write it, and as the unit library knows it. */
 export interface UnitName {
@@ -198,13 +198,12 @@ export const quantities: Readonly<Record<Quantity, QuantityInfo>> = {
   count: { words: 'a number', si: plain, units: [plain], example: '2' },
 }
 
-const math = create({ ...unitDependencies, ...createUnitDependencies })
-// The unit library knows turns only as hertz.
-math.createUnit('rpm', { definition: '1 Hz', prefixes: 'none' })
+/** The unit library knows turns only as hertz. */
+const inLibrary = (value: number, mathjs: string) => libraryUnit(value, mathjs === 'rpm' ? 'Hz' : mathjs)
 const turnsPerMinute = 60
 
 /** Base dimensions as one text, to compare. */
-const dimensionOf = (mathjs: string): string => math.unit(1, mathjs).dimensions.join()
+const dimensionOf = (mathjs: string): string => inLibrary(1, mathjs).dimensions.join()
 
 /** Multiplies a unit's number to SI (after `offset`), or says why it cannot. */
 export interface Conversion {
@@ -237,16 +236,16 @@ const make = (si: UnitName, unit: UnitName): Conversion | undefined => {
   if (si.mathjs === undefined || unit.mathjs === undefined) return undefined
   if (dimensionOf(si.mathjs) !== dimensionOf(unit.mathjs)) return undefined
   if (si.mathjs === 'rpm')
-    return unit.mathjs === 'rpm' ? linear(1) : linear(turnsPerMinute * math.unit(1, unit.mathjs).toNumber('Hz'))
+    return unit.mathjs === 'rpm' ? linear(1) : linear(turnsPerMinute * inLibrary(1, unit.mathjs).toNumber('Hz'))
   const from = unit.mathjs
   const to = si.mathjs
-  const zero = math.unit(0, from).toNumber(to)
-  const one = math.unit(1, from).toNumber(to)
+  const zero = inLibrary(0, from).toNumber(to)
+  const one = inLibrary(1, from).toNumber(to)
   if (zero === 0) return linear(one)
   // A scale with another zero: the noise is that of the difference.
   return {
-    toSi: (value) => Number(math.unit(value, from).toNumber(to).toPrecision(12)),
-    fromSi: (value) => Number(math.unit(value, to).toNumber(from).toPrecision(12)),
+    toSi: (value) => Number(inLibrary(value, from).toNumber(to).toPrecision(12)),
+    fromSi: (value) => Number(inLibrary(value, to).toNumber(from).toPrecision(12)),
   }
 }
 
@@ -262,7 +261,7 @@ export const quantityOf = (mathjs: string): Quantity | undefined => {
 /** Whether the unit library knows this spelling. */
 export const isUnit = (mathjs: string): boolean => {
   try {
-    math.unit(1, mathjs)
+    inLibrary(1, mathjs)
     return true
   } catch {
     return false
