@@ -8,6 +8,7 @@ import remarkMath from 'remark-math'
 import remarkMdxFrontmatter from 'remark-mdx-frontmatter'
 import { defineConfig } from 'vite'
 import { lessonIndex } from './scripts/lesson-index.ts'
+import { rehypeBareMath } from './src/mdx/rehype-bare-math.ts'
 import { remarkContents } from './src/mdx/remark-contents.ts'
 
 const folder = (path: string) => fileURLToPath(new URL(path, import.meta.url))
@@ -31,7 +32,8 @@ export default defineConfig(({ isSsrBuild }) => ({
       ...mdx({
         include: [/\/content\/.*\.mdx$/],
         remarkPlugins: [remarkFrontmatter, remarkContents, remarkMdxFrontmatter, remarkGfm, remarkMath],
-        rehypePlugins: [rehypeKatex],
+        // As MathML alone: the browser sets it, screen readers read it, and it weighs a third of KaTeX's own boxes.
+        rehypePlugins: [[rehypeKatex, { output: 'mathml' }], rehypeBareMath],
       }),
     },
     react(),

@@ -28,7 +28,12 @@ function buildWhatIsOld() {
       ...['package.json', 'package-lock.json', ...sources].map((name) => newest(inProject(name))),
     )
     if (existsSync(built) && statSync(built).mtimeMs >= changed) continue
-    const { status } = spawnSync('npm', ['run', '--silent', script], { cwd: projectRoot, stdio: 'inherit' })
+    const { status } = spawnSync('npm', ['run', '--silent', script], {
+      cwd: projectRoot,
+      stdio: 'inherit',
+      // However the server is to run, the site is always built to be served.
+      env: { ...process.env, NODE_ENV: 'production' },
+    })
     if (status !== 0) throw new Error(`npm run ${script} failed.`)
   }
 }
