@@ -80,7 +80,7 @@ test('sign up, learn, be marked, and find it kept', async ({ page, request, base
 
   // A wrong unit is told beside the field; the text stays.
   await own.getByLabel(/^Net head/).fill('3 bar')
-  await expect(own.getByText(/a head is wanted, for example/)).toBeVisible()
+  await expect(own.getByText(/a head is wanted, for example/).first()).toBeVisible()
   await expect(own.getByLabel(/^Net head/)).toHaveValue('3 bar')
   await own.getByLabel(/^Net head/).fill('27.5')
 

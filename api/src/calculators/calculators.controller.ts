@@ -9,7 +9,7 @@ import { inputsJsonSchema } from './inputs-json-schema.ts'
 
 @ApiTags('calculators')
 @Controller('calculators')
-@Public()
+@Public({ readsSession: false })
 export class CalculatorsController {
   constructor(private readonly service: CalculatorsService) {}
 
