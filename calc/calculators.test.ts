@@ -154,6 +154,13 @@ describe.each(definitions.map((definition) => [definition.id, definition] as con
     expect(calculators).toHaveProperty(id, definition)
   })
 
+  test('its inputs name each other as they are', () => {
+    for (const [key, { or, goesWith, needs }] of Object.entries(definition.inputs)) {
+      for (const other of [or, goesWith, needs]) if (other !== undefined) expect(keys).toContain(other)
+      if (or !== undefined) expect(definition.inputs[or]!.or, `${or} is the alternative of ${key}`).toBe(key)
+    }
+  })
+
   test('its form starts with an answer', () => {
     checkSolution(definition, initial, solve(id, initial))
   })

@@ -44,7 +44,13 @@ const findField = (definition: CalculatorDefinition, inputs: Inputs, name: strin
     cell,
     uncertainty,
   }
-  const value = read(inputs, field) ?? cell.fallback
+  if (cell.whole && uncertainty > 0)
+    throw new CalculationError(
+      'inconsistent',
+      name,
+      `${cell.label} is counted, so it has no uncertainty: leave it out.`,
+    )
+  const value = read(inputs, field)
   if (typeof value !== 'number')
     throw new CalculationError('missing', name, `${cell.label} is not given, so it can have no uncertainty.`)
   return { ...field, value }
@@ -63,11 +69,13 @@ const cellOf = (input: Input, index: number | undefined, column: string | undefi
   }
 }
 
-const read = (inputs: Inputs, { key, index, column }: Omit<Field, 'value'>): unknown => {
+/** The number as given, or the fallback where its place is there but left empty. */
+const read = (inputs: Inputs, { key, index, column, cell }: Omit<Field, 'value'>): unknown => {
   const value = inputs[key]
-  if (column === undefined) return index === undefined ? value : (value as readonly number[])[index]
-  const row = index === undefined ? (value as PlainRow) : (value as readonly PlainRow[])[index]
-  return row?.[column]
+  if (index === undefined && column === undefined) return value ?? cell.fallback
+  const item = index === undefined ? value : (value as readonly unknown[] | undefined)?.[index]
+  if (column === undefined) return item
+  return item === undefined ? undefined : ((item as PlainRow)[column] ?? cell.fallback)
 }
 
 const replace = (inputs: Inputs, { key, index, column }: Field, value: number): Inputs => {
@@ -93,18 +101,39 @@ const scalarKeys = (outputs: Outputs): string[] =>
 /** Small against what matters, large against the roots' tolerance. */
 const relativeStep = 1e-4
 
-/** How much each scalar output changes with one field: a central difference, one-sided at the end of a range. */
-const sensitivities = (id: string, inputs: Inputs, field: Field, keys: readonly string[]): Map<string, number> => {
+/** How much each scalar output changes with one field: a central difference, one-sided at the end of a range or of what has a solution. */
+const sensitivities = (
+  id: string,
+  inputs: Inputs,
+  field: Field,
+  outputs: Outputs,
+  keys: readonly string[],
+): Map<string, number> => {
   const [low, high] = field.cell.range
   const step = relativeStep * Math.max(Math.abs(field.value), field.uncertainty)
-  const below = Math.max(low, field.value - step)
-  const above = Math.min(high, field.value + step)
-  const at = (value: number) => calculate(id, replace(inputs, field, value))
-  const [one, two] = [at(below), at(above)]
+  const here = { value: field.value, outputs }
+  const at = (value: number) => {
+    try {
+      return { value, outputs: calculate(id, replace(inputs, field, value)) }
+    } catch (error) {
+      if (error instanceof CalculationError) return here
+      throw error
+    }
+  }
+  const below = at(Math.max(low, field.value - step))
+  const above = at(Math.min(high, field.value + step))
+  if (below.value === above.value)
+    throw new CalculationError(
+      'no-solution',
+      field.name,
+      `${field.cell.label} cannot differ from the value given, so nothing is known of its uncertainty.`,
+    )
   return new Map(
     keys.flatMap((key) => {
-      const [a, b] = [one[key], two[key]]
-      return typeof a === 'number' && typeof b === 'number' ? [[key, (b - a) / (above - below)] as const] : []
+      const [a, b] = [below.outputs[key], above.outputs[key]]
+      return typeof a === 'number' && typeof b === 'number'
+        ? [[key, (b - a) / (above.value - below.value)] as const]
+        : []
     }),
   )
 }
@@ -129,7 +158,7 @@ export const withUncertainty = (
   const keys = scalarKeys(outputs)
   const parts = findFields(id, inputs, standardUncertainties)
     .filter((field) => field.uncertainty > 0)
-    .map((field) => ({ field, slopes: sensitivities(id, inputs, field, keys) }))
+    .map((field) => ({ field, slopes: sensitivities(id, inputs, field, outputs, keys) }))
   return {
     outputs: Object.fromEntries(
       keys.map((key) => {
