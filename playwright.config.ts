@@ -13,6 +13,8 @@ export default defineConfig({
   fullyParallel: false,
   workers: 2,
   forbidOnly: Boolean(process.env.CI),
+  // Once more on a loaded machine; what passed only then is told as flaky.
+  retries: process.env.CI ? 1 : 0,
   timeout: 90_000,
   expect: { timeout: 10_000 },
   use: {

@@ -8,7 +8,16 @@ export default defineConfig({
   root,
   test: {
     projects: [
-      { root, test: { name: 'calc', include: ['calc/**/*.test.ts'], environment: 'node', testTimeout: 60_000 } },
+      {
+        root,
+        test: {
+          name: 'calc',
+          setupFiles: ['calc/testing/setup.ts'],
+          include: ['calc/**/*.test.ts'],
+          environment: 'node',
+          testTimeout: 60_000,
+        },
+      },
       { root, test: { name: 'content', include: ['content/**/*.test.ts'], environment: 'node', testTimeout: 60_000 } },
       {
         root,
