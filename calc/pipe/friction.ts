@@ -9,7 +9,7 @@ import { flow, insideDiameter, pipeLength, roughness } from './inputs.ts'
 /** Relative roughness to which Colebrook and White's formula is drawn in L. F. Moody, Trans. ASME 66 (1944). */
 const roughestDrawn = 0.05
 /** Slower than this silt settles and air stays at humps; faster than this surge and wear grow (common practice, no source). */
-const usualVelocity = [0.5, 3] as const
+export const usualVelocity = [0.5, 3] as const
 
 /**
  * Head lost to friction in a full round pipe, Darcy–Weisbach h = f·(L/D)·v²/2g, with flow Q (m³/s), inside diameter D, length L and absolute

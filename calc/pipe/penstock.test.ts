@@ -236,6 +236,7 @@ describe('penstock', () => {
     const lost = (i: number) => found.sections[i]!.frictionLoss + found.sections[i]!.fittingsLoss
     expectNear(hump!.energyHead, 48 - (lost(0) * 60) / 90, { relative: 1e-12 })
     expectNear(joint!.energyHead, 48 - lost(0), { relative: 1e-12 })
+    expectNear(low!.energyHead, 48 - lost(0) - (lost(1) * 110) / 150, { relative: 1e-12 })
     expectNear(joint!.hydraulicGrade, joint!.energyHead - upper!.velocity ** 2 / (2 * g), { relative: 1e-12 })
     expectNear(low!.hydraulicGrade, low!.energyHead - lower!.velocity ** 2 / (2 * g), { relative: 1e-12 })
     expectNear(hump!.pressureHead, hump!.hydraulicGrade - 30, { relative: 1e-12 })

@@ -6,6 +6,7 @@ import { format, join, say } from '../units/format.ts'
 import { waterTemperature } from '../water/inputs.ts'
 import { waterDensity, waterKinematicViscosity } from '../water/properties.ts'
 import { laminarTo, turbulentFrom, velocityHead } from './friction-factor.ts'
+import { usualVelocity } from './friction.ts'
 import { flow } from './inputs.ts'
 import { flowThroughNozzles, sectionLoss } from './penstock-flow.ts'
 import { checkProfile, gradeLineOf } from './penstock-profile.ts'
@@ -15,8 +16,6 @@ import { checkSections, sections } from './penstock-sections.ts'
 const mostUsefulLoss = 1 / 3
 /** Common practice, no source: penstocks are mostly chosen for a loss of 5 to 6 %. */
 const highLoss = 0.1
-/** Common practice, no source. */
-const highVelocity = 3
 
 /**
  * A whole penstock, sections in series, each perhaps of like pipes side by side: the flow, or the flow that given nozzles draw; what friction
@@ -218,7 +217,7 @@ export const penstock = defineCalculator({
     const deepest = grossHead - Math.min(0, ...(profile ?? []).map(({ elevation }) => elevation))
     const atRest = join(format(waterDensity(waterTemperature) * g * deepest, 'pressure'))
     const underVacuum = gradeLine.find(({ pressureHead }) => pressureHead !== undefined && pressureHead < 0)
-    const fast = sections.findIndex(({ velocity }) => velocity > highVelocity)
+    const fast = sections.findIndex(({ velocity }) => velocity > usualVelocity[1])
     const uncertain = sections.findIndex(({ reynolds }) => reynolds > laminarTo && reynolds < turbulentFrom)
     return [
       {
@@ -259,7 +258,7 @@ export const penstock = defineCalculator({
             {
               level: 'check' as const,
               about: ['sections' as const],
-              say: `In section ${fast + 1} the water runs faster than ${say(highVelocity, 'velocity')}: surge, wear and loss are all high (common practice, no source).`,
+              say: `In section ${fast + 1} the water runs faster than ${say(usualVelocity[1], 'velocity')}: surge, wear and loss are all high (common practice, no source).`,
             },
           ]
         : []),
