@@ -3,7 +3,7 @@ import { spawnSync } from 'node:child_process'
 import { existsSync, readdirSync, statSync } from 'node:fs'
 import path from 'node:path'
 import { type MailFake, startMailFake } from '../fakes/mail-fake.ts'
-import { ConfigurationError, type Environment, mailFakePorts, readEnvironment } from '../src/config/environment.ts'
+import { type Environment, mailFakePorts, readEnvironment } from '../src/config/environment.ts'
 import { demoAccounts, demoPassword } from '../src/database/seed/demo.ts'
 import { projectRoot } from '../src/project-root.ts'
 import { builtServer, ended, startServer } from './server-process.ts'
@@ -66,7 +66,6 @@ async function start() {
 }
 
 start().catch((error: unknown) => {
-  const isPlain = error instanceof ConfigurationError || error instanceof Error
-  console.error(isPlain ? error.message : error)
+  console.error(error instanceof Error ? error.message : error)
   process.exit(1)
 })

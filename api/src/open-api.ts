@@ -1,6 +1,7 @@
 import type { NestExpressApplication } from '@nestjs/platform-express'
 import { DocumentBuilder, SwaggerModule } from '@nestjs/swagger'
 import { version } from '../../package.json'
+import { errorSchema } from './common/dto/error.schema.ts'
 import { antiForgeryHeader } from './common/guards/access.guard.ts'
 
 /** The contract, made from the routes and their zod schemas: a page at `/api/docs`, the document at `/api/docs-json`. */
@@ -12,6 +13,7 @@ export function serveOpenApi(app: NestExpressApplication) {
         `${antiForgeryHeader.name}: ${antiForgeryHeader.value}. Every refusal has one shape: code, message, fields.`,
     )
     .setVersion(version)
+    .addGlobalResponse({ status: 'default', description: 'A refusal', standardSchema: errorSchema })
     .build()
   SwaggerModule.setup('api/docs', app, () => SwaggerModule.createDocument(app, settings))
 }

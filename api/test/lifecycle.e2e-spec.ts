@@ -3,6 +3,7 @@ import { existsSync, mkdtempSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import path from 'node:path'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
+import { demoAccounts, demoPassword } from '#api/database/seed/demo.ts'
 import { builtServer } from '../scripts/server-process.ts'
 
 /** The built server as its own process; these take a while, and need `npm run build` before them. */
@@ -44,19 +45,21 @@ describe.runIf(process.env.DEEP)('the server process', () => {
   it('starts straight after kill -9 with what was acknowledged, and ends cleanly on SIGTERM', async () => {
     const first = start(5733)
     await first.listening
-    const answer = await fetch('http://localhost:5733/api/auth/sign-up', {
+    const { email } = demoAccounts.learner
+    const signedIn = await fetch('http://localhost:5733/api/auth/session', {
       method: 'POST',
-      headers: { 'content-type': 'application/json', 'x-leatwright': '1' },
-      body: JSON.stringify({ name: 'Kept', email: 'kept@leatwright.test', password: 'a leat along the hill' }),
+      headers: { 'content-type': 'application/json' },
+      body: JSON.stringify({ email, password: demoPassword }),
     })
-    expect(answer.status).toBe(202)
+    expect(signedIn.status).toBe(200)
+    const cookie = signedIn.headers.getSetCookie().map((line) => line.split(';')[0]!)
     first.child.kill('SIGKILL')
     await first.ended
 
     const second = start(5733)
     await second.listening
-    const courses = (await (await fetch('http://localhost:5733/api/courses')).json()) as unknown[]
-    expect(courses).toHaveLength(5)
+    const me = await fetch('http://localhost:5733/api/users/me', { headers: { cookie: cookie.join('; ') } })
+    expect(await me.json()).toMatchObject({ email })
     second.child.kill('SIGTERM')
     expect(await second.ended).toBe(0)
   })
