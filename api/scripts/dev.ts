@@ -7,12 +7,17 @@ import { demoAccounts, demoPassword } from '../src/database/seed/demo.ts'
 import { projectRoot } from '../src/project-root.ts'
 import { ended, startServer } from './server-process.ts'
 
-const site = await createServer({ root: path.join(projectRoot, 'site') })
+const { PORT } = readEnvironment(process.env)
+const target = `http://localhost:${PORT}`
+const site = await createServer({
+  root: path.join(projectRoot, 'site'),
+  server: { proxy: { '/api': { target }, '/lessons': { target } } },
+})
 await site.listen()
 const siteUrl = site.resolvedUrls!.local[0]!.replace(/\/$/, '')
 
 const environment = readEnvironment({ PUBLIC_URL: siteUrl, ...process.env })
-const ports = mailFakePorts(environment.PORT)
+const ports = mailFakePorts(PORT)
 if (!process.env.SMTP_URL) {
   const file = path.join(environment.DATA_DIR, 'mail-fake.jsonl')
   await startMailFake({ smtpPort: ports.smtp, inboxPort: ports.inbox, file })
@@ -20,7 +25,7 @@ if (!process.env.SMTP_URL) {
 
 const serverEnvironment = { ...process.env, PUBLIC_URL: environment.PUBLIC_URL }
 const announce = () => {
-  console.log(`\nLeatwright: ${siteUrl} (the site; /api and /lessons go to port ${environment.PORT})`)
+  console.log(`\nLeatwright: ${siteUrl} (the site; /api and /lessons go to port ${PORT})`)
   if (!process.env.SMTP_URL) console.log(`Mail inbox: http://localhost:${ports.inbox}`)
   console.log(
     `Demo accounts: ${Object.values(demoAccounts)
