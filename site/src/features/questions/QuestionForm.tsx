@@ -17,13 +17,13 @@ interface QuestionFormProps {
 
 export function QuestionForm({ attempt, onHandedIn }: QuestionFormProps) {
   const id = useId()
-  const { states, write, keepAll } = useDrafts(attempt)
+  const { answers, states, write, keepAll } = useDrafts(attempt)
   const submit = useMutation(useSubmitAttemptOptions(attempt, keepAll))
   const [asking, setAsking] = useState(false)
 
   const questionId = (question: string) => `${id}${question}`
   const open = attempt.questions.flatMap((question, i) => {
-    const lacking = lack(question, attempt.answers[question.id])
+    const lacking = lack(question, answers[question.id])
     return lacking === undefined ? [] : [{ id: question.id, number: i + 1, lacking }]
   })
 
@@ -48,7 +48,7 @@ export function QuestionForm({ attempt, onHandedIn }: QuestionFormProps) {
             <QuestionFields
               question={question}
               number={i + 1}
-              answer={attempt.answers[question.id]}
+              answer={answers[question.id]}
               write={(answer) => write(question.id, answer)}
             />
             <SavedState state={states[question.id]} retry={() => void keepAll().catch(() => undefined)} />

@@ -10,13 +10,15 @@ const pause = 700
 export type DraftState = 'waiting' | 'kept' | { failed: Error }
 
 /**
- * The answers of a round while they are written. They stand in the query cache, so that they outlast the page that shows them, and
+ * The answers of a round while they are written. The form holds them, since a box that is ticked must stay ticked in the same moment and
+ * the query cache tells of changes only a moment later; the cache gets them too, so that they outlast the page that shows them. They
  * follow to the server at a short distance.
  */
 export function useDrafts(attempt: Attempt) {
   const queryClient = useQueryClient()
   const { queryKey } = attemptQueries.current(attempt.lesson, attempt.block)
   const { mutateAsync: save } = useMutation(useSaveAnswerOptions(attempt))
+  const [answers, setAnswers] = useState(attempt.answers)
   const [states, setStates] = useState<Readonly<Record<string, DraftState>>>({})
   const unsaved = useRef(new Map<string, Answer>())
   const timers = useRef(new Map<string, ReturnType<typeof setTimeout>>())
@@ -48,6 +50,7 @@ export function useDrafts(attempt: Attempt) {
   }, [keep])
 
   const write = (question: string, answer: Answer) => {
+    setAnswers((answers) => ({ ...answers, [question]: answer }))
     queryClient.setQueryData(
       queryKey,
       (round) => round && { ...round, answers: { ...round.answers, [question]: answer } },
@@ -72,5 +75,5 @@ export function useDrafts(attempt: Attempt) {
     }
   }, [keepAll])
 
-  return { states, write, keepAll }
+  return { answers, states, write, keepAll }
 }
