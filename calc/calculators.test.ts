@@ -105,6 +105,10 @@ const plainValue = (input: Input): Inputs[string] => {
       return Array.from({ length: input.least }, () => plainRow(input.columns))
     case 'series':
       return Array.from({ length: input.least }, () => (input.range[0] + input.range[1]) / 2)
+    case 'runs':
+      return Array.from({ length: input.least }, () =>
+        Array.from({ length: input.leastEach }, () => (input.range[0] + input.range[1]) / 2),
+      )
   }
 }
 
@@ -117,7 +121,7 @@ const cellsOf = ({ inputs }: CalculatorDefinition, values: Inputs) => {
   }[] = []
   const add = (
     field: string,
-    cell: Cell | { kind: 'series'; range: readonly [number, number] },
+    cell: Cell | { kind: 'series' | 'runs'; range: readonly [number, number] },
     put: (value: unknown) => object,
   ) => cells.push({ field, cell: cell.kind === 'choice' ? undefined : cell, put })
   for (const [key, value] of Object.entries(values)) {
@@ -125,6 +129,10 @@ const cellsOf = ({ inputs }: CalculatorDefinition, values: Inputs) => {
     if (input.kind === 'scalar' || input.kind === 'choice') add(key, input, (put) => ({ ...values, [key]: put }))
     if (input.kind === 'series')
       add(`${key}[0]`, input, (put) => ({ ...values, [key]: [put, ...(value as readonly number[]).slice(1)] }))
+    if (input.kind === 'runs') {
+      const [[, ...others] = [], ...runs] = value as readonly (readonly number[])[]
+      add(`${key}[0]`, input, (put) => ({ ...values, [key]: [[put, ...others], ...runs] }))
+    }
     if (input.kind === 'group')
       for (const [column, cell] of Object.entries(input.columns))
         add(`${key}.${column}`, cell, (put) => ({ ...values, [key]: { ...(value as PlainRow), [column]: put } }))
@@ -155,14 +163,34 @@ describe.each(definitions.map((definition) => [definition.id, definition] as con
   })
 
   test('its inputs name each other as they are', () => {
-    for (const [key, { or, goesWith, needs }] of Object.entries(definition.inputs)) {
-      for (const other of [or, goesWith, needs]) if (other !== undefined) expect(keys).toContain(other)
+    for (const [key, { or, goesWith, needs, when }] of Object.entries(definition.inputs)) {
+      for (const other of [or, goesWith, needs, when?.key]) if (other !== undefined) expect(keys).toContain(other)
       if (or !== undefined) expect(definition.inputs[or]!.or, `${or} is the alternative of ${key}`).toBe(key)
     }
   })
 
   test('its form starts with an answer', () => {
     checkSolution(definition, initial, solve(id, initial))
+  })
+
+  test('its example has an answer, and is not what the form starts with', () => {
+    const { say, inputs } = definition.example
+    expect(say).toMatch(/\w.*\.$/)
+    expect(inputs).not.toEqual(initial)
+    checkSolution(definition, inputs, solve(id, inputs))
+  })
+
+  test('its plots name what there is', () => {
+    for (const plot of definition.plots ?? []) {
+      if ('of' in plot) {
+        expect(definition.outputs[plot.of]?.kind).toBe('scalar')
+        expect(definition.inputs[plot.against]?.kind).toBe('scalar')
+        continue
+      }
+      const output = definition.outputs[plot.rows]
+      const columns = output?.kind === 'rows' ? Object.keys(output.columns) : []
+      expect(columns).toEqual(expect.arrayContaining([plot.x, ...plot.y]))
+    }
   })
 
   test('warns of its hazards, and defers to the law', () => {
@@ -265,7 +293,8 @@ describe.each(definitions.map((definition) => [definition.id, definition] as con
         expectRefusal('missing', first, () => calculate(id, without(first, second, ...company)))
         const both = { [first]: values[first], [second]: values[second] }
         expectRefusal('inconsistent', second, () => calculate(id, { ...initial, ...both }))
-      } else if (input.goesWith !== undefined || input.needs !== undefined || input.optional)
+      } else if (input.when !== undefined && initial[key] === undefined) continue
+      else if (input.goesWith !== undefined || input.needs !== undefined || input.optional)
         expect(() => calculate(id, without(key, ...company))).not.toThrow()
       else if (!('fallback' in input && input.fallback !== undefined))
         expectRefusal('missing', key, () => calculate(id, without(key, ...company)))

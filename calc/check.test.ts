@@ -53,6 +53,7 @@ const definition = defineCalculator({
   cautions: () => [],
   doesNotCheck: [],
   sources: [],
+  example: { say: 'None.', inputs: {} },
 })
 const good = { depth: 2, flow: 0.5 }
 const check = (raw: unknown) => checkInputs(definition, raw)

@@ -37,6 +37,29 @@ const checkNumber = (cell: Scalar, field: string, value: unknown): number => {
 const isRecord = (value: unknown): value is Record<string, unknown> =>
   typeof value === 'object' && value !== null && !Array.isArray(value)
 
+/** Whether a value has its place beside the choice that it depends on; what is not chosen counts as its fallback. */
+export const hasPlace = (
+  { when }: Input | Cell,
+  beside: Readonly<Record<string, Input | Cell>>,
+  raw: Readonly<Record<string, unknown>>,
+): boolean => {
+  if (when === undefined) return true
+  const other = beside[when.key]
+  const chosen = raw[when.key] ?? (other?.kind === 'choice' ? other.fallback : undefined)
+  return typeof chosen === 'string' && when.is.includes(chosen)
+}
+
+const outOfPlace = (said: Input | Cell, field: string, beside: Readonly<Record<string, Input | Cell>>) => {
+  const { key, is } = said.when!
+  const other = beside[key]
+  const words = other?.kind === 'choice' ? other.words : undefined
+  return new CalculationError(
+    'inconsistent',
+    field,
+    `${said.label} belongs to ${is.map((value) => words?.[value] ?? value).join(' or ')}: leave it out otherwise.`,
+  )
+}
+
 const checkColumns = (columns: Columns, label: string, field: string, value: unknown): PlainRow => {
   if (!isRecord(value)) throw new CalculationError('not-finite', field, `${label}: give its values by name.`)
   for (const key of Object.keys(value))
@@ -46,6 +69,10 @@ const checkColumns = (columns: Columns, label: string, field: string, value: unk
   for (const key of Object.keys(columns)) {
     const cell = columns[key]!
     const cellValue = value[key]
+    if (!hasPlace(cell, columns, value)) {
+      if (cellValue !== undefined) throw outOfPlace(cell, `${field}.${key}`, columns)
+      continue
+    }
     if (cellValue !== undefined) row[key] = checkCell(cell, `${field}.${key}`, cellValue)
     else if (cell.fallback !== undefined) row[key] = cell.fallback
     else if (!cell.optional) throw new CalculationError('missing', `${field}.${key}`, `${cell.label} is wanted.`)
@@ -64,13 +91,29 @@ const checkInput = (input: Input, key: string, value: unknown): InputValue => {
       return checkList(input, key, value).map((row, i) =>
         checkColumns(input.columns, `${input.label}, ${input.row} ${i + 1}`, `${key}[${i}]`, row),
       )
-    case 'series':
-      return checkList(input, key, value).map((item, i) => checkNumber(numberOf(input, i), `${key}[${i}]`, item))
+    case 'series': {
+      const { label, row, quantity, range, usual, unit } = input
+      // One description serves all places: a record of ten years is long.
+      const cell: Scalar = { kind: 'scalar', label, quantity, range, usual, unit }
+      return checkList(input, key, value).map((item, i) =>
+        typeof item === 'number' && item >= range[0] && item <= range[1]
+          ? item
+          : checkNumber({ ...cell, label: `${label}, ${row} ${i + 1}` }, `${key}[${i}]`, item),
+      )
+    }
+    case 'runs':
+      return checkList({ ...input, row: input.run }, key, value).map((run, i) => {
+        const name = `${input.label}, ${input.run} ${i + 1}`
+        const each = { label: name, row: input.row, least: input.leastEach, most: input.mostEach }
+        return checkList(each, `${key}[${i}]`, run).map((item, j) =>
+          checkNumber({ ...numberOf(input, j), label: `${name}, ${input.row} ${j + 1}` }, `${key}[${i}]`, item),
+        )
+      })
   }
 }
 
 const checkList = (
-  { label, row, least, most }: Extract<Input, { kind: 'rows' | 'series' }>,
+  { label, row, least, most }: { label: string; row: string; least: number; most: number },
   key: string,
   value: unknown,
 ) => {
@@ -126,6 +169,10 @@ export const checkInputs = (definition: CalculatorDefinition, raw: unknown): Inp
     if (input.needs !== undefined && isGiven(key) && !isGiven(input.needs))
       throw new CalculationError('missing', input.needs, `${label(input.needs)} is wanted with ${input.label}.`)
 
+    if (!hasPlace(input, inputs, raw)) {
+      if (isGiven(key)) throw outOfPlace(input, key, inputs)
+      continue
+    }
     if (isGiven(key)) given[key] = checkInput(input, key, raw[key])
     else if ('fallback' in input && input.fallback !== undefined) given[key] = input.fallback
     else if (!input.optional && input.or === undefined && input.goesWith === undefined && input.needs === undefined)

@@ -1,5 +1,6 @@
 /** What a calculator is. Every screen, route, question and working reads one of these objects. */
 import type { Formula, WriteFormula } from './formula.ts'
+import type { TableId } from './tables/table.ts'
 
 export type Quantity =
   | 'head'
@@ -22,6 +23,25 @@ export type Quantity =
   | 'fraction'
   | 'ratio'
   | 'count'
+  | 'mass'
+  | 'force'
+  | 'temperatureDifference'
+  | 'voltage'
+  | 'current'
+  | 'resistance'
+  | 'resistancePerMetre'
+  | 'resistancePerKm'
+  | 'conductorArea'
+  | 'frequency'
+  | 'voltsPerThousandRpm'
+  | 'conductivity'
+  | 'saltCalibration'
+  | 'weirCoefficient'
+  | 'years'
+  | 'hours'
+  | 'money'
+  | 'pricePerKwh'
+  | 'pricePerMetre'
 
 export type Hazard = 'pressure' | 'electricity' | 'stream' | 'hot-work' | 'rotating' | 'lifting' | 'digging'
 
@@ -52,12 +72,20 @@ interface Said {
  * - `or`: exactly one of this key and that one is given.
  * - `goesWith`: given exactly when that key is.
  * - `needs`: optional, and only with that key.
+ * - `when`: only where that choice (beside it) has one of these values; there it is wanted, unless it is `optional` as well.
  */
 interface Absence {
   optional?: true
   or?: string
   goesWith?: string
   needs?: string
+  when?: { key: string; is: readonly string[] }
+}
+
+/** A table of the trade, and its column that holds this value: choosing a row there fills every input that names the same table. */
+export interface FromTable {
+  table: TableId
+  column: string
 }
 
 export type Scalar = Said &
@@ -76,6 +104,7 @@ export type Scalar = Said &
     fallback?: number
     /** The unit a form starts with, where it is not the first of the quantity. */
     unit?: string
+    pick?: FromTable
   }
 export type Choice<V extends string = string> = Said &
   Absence & {
@@ -114,14 +143,36 @@ export type Series = Said &
     least: number
     most: number
     initial?: readonly number[]
+    /** Too long for a field each, such as a year of flows: a form takes it as a record, from a file or by paste. */
+    long?: true
+  }
+/** Several lists of numbers of one quantity, such as the rises of each run of levels. */
+export type Runs = Said &
+  Absence & {
+    kind: 'runs'
+    /** What one list is called: "run". */
+    run: string
+    /** What one number is called: "rise". */
+    row: string
+    quantity: Quantity
+    range: readonly [number, number]
+    usual?: readonly [number, number]
+    unit?: string
+    /** How many lists. */
+    least: number
+    most: number
+    /** How many numbers in each. */
+    leastEach: number
+    mostEach: number
+    initial?: readonly (readonly number[])[]
   }
 /** One number of a series, by its place from 0, as a scalar. */
-export const numberOf = ({ label, row, quantity, range, usual, unit }: Series, place: number): Scalar => ({
+export const numberOf = ({ label, row, quantity, range, usual, unit }: Series | Runs, place: number): Scalar => ({
   kind: 'scalar',
   label: `${label}, ${row} ${place + 1}`,
   ...{ quantity, range, usual, unit },
 })
-export type Input = Scalar | Choice | Rows | Group | Series
+export type Input = Scalar | Choice | Rows | Group | Series | Runs
 
 interface ScalarOutput extends Said {
   kind: 'scalar'
@@ -149,7 +200,7 @@ type Spread<T> = { [K in keyof T]: T[K] }
 type CellValue<C> = C extends { kind: 'choice'; of: readonly (infer V)[] } ? V : number
 type MayMiss<I> = I extends { fallback: number | string }
   ? false
-  : I extends { optional: true } | { or: string } | { goesWith: string } | { needs: string }
+  : I extends { optional: true } | { or: string } | { goesWith: string } | { needs: string } | { when: object }
     ? true
     : false
 type Record_<C> = Spread<
@@ -159,11 +210,13 @@ type Record_<C> = Spread<
 >
 type ValueOf<I> = I extends { kind: 'series' }
   ? readonly number[]
-  : I extends { kind: 'rows'; columns: infer C }
-    ? readonly Record_<C>[]
-    : I extends { kind: 'group'; columns: infer C }
-      ? Record_<C>
-      : CellValue<I>
+  : I extends { kind: 'runs' }
+    ? readonly (readonly number[])[]
+    : I extends { kind: 'rows'; columns: infer C }
+      ? readonly Record_<C>[]
+      : I extends { kind: 'group'; columns: infer C }
+        ? Record_<C>
+        : CellValue<I>
 /** What `solve` is handed: checked, SI, fallbacks filled in. */
 export type Given<I> = Spread<
   { [K in keyof I as MayMiss<I[K]> extends true ? never : K]: ValueOf<I[K]> } & {
@@ -201,6 +254,22 @@ export interface Source {
   where?: string
 }
 
+/**
+ * A plot whose shape teaches. Either one output over one input, the others staying, from a part to a multiple of the number given; or columns
+ * of rows that were found (`curve`), over another column of theirs.
+ */
+export type PlotShape =
+  | { say: string; of: string; against: string; from: number; to: number }
+  | { say: string; rows: string; x: string; y: readonly string[] }
+
+/** Numbers to try, other than those a form starts with. */
+export interface Example {
+  /** Whose numbers they are, in a sentence. */
+  say: string
+  /** SI. */
+  inputs: Inputs
+}
+
 type Keys<I, O> = Extract<keyof I | keyof O, string>
 export interface Calculator<I extends Record<string, Input>, O extends Record<string, Output>> {
   id: string
@@ -216,6 +285,8 @@ export interface Calculator<I extends Record<string, Input>, O extends Record<st
   cautions(given: Given<I>, found: Found<O>): readonly Caution<Keys<I, O>>[]
   doesNotCheck: readonly string[]
   sources: readonly Source[]
+  example: Example
+  plots?: readonly PlotShape[]
 }
 
 /** Lets the compiler check a calculator's keys, choices and rows against its own declaration. */
@@ -225,7 +296,8 @@ export const defineCalculator = <const I extends Record<string, Input>, const O 
 
 export type PlainValue = number | string
 export type PlainRow = Readonly<Record<string, PlainValue | undefined>>
-export type InputValue = PlainValue | PlainRow | readonly PlainRow[] | readonly number[]
+export type InputValue =
+  PlainValue | PlainRow | readonly PlainRow[] | readonly number[] | readonly (readonly number[])[]
 export type Inputs = Readonly<Record<string, InputValue | undefined>>
 export type OutputValue = PlainValue | readonly PlainRow[]
 export type Outputs = Readonly<Record<string, OutputValue | undefined>>

@@ -28,6 +28,7 @@ const definition = defineCalculator({
   cautions: () => [],
   doesNotCheck: [],
   sources: [],
+  example: { say: 'None.', inputs: {} },
 })
 const found = {
   flow: 0.00954,

@@ -67,6 +67,9 @@ const unusual = (cell: Cell, key: string, name: string, value: unknown): Caution
       ]
     : []
 
+const runsOf = (value: InputValue | undefined): readonly (readonly number[])[] =>
+  (value ?? []) as readonly (readonly number[])[]
+
 const rowsOf = (value: InputValue | undefined): readonly PlainRow[] =>
   Array.isArray(value) ? (value as readonly PlainRow[]) : typeof value === 'object' ? [value as PlainRow] : []
 
@@ -79,16 +82,20 @@ const unusualValues = (definition: CalculatorDefinition, given: Inputs): Caution
       ? unusual(input, key, input.label, given[key])
       : input.kind === 'series'
         ? numbersOf(given[key]).flatMap((value, i) => unusual(numberOf(input, i), key, numberOf(input, i).label, value))
-        : rowsOf(given[key]).flatMap((row, i) =>
-            Object.entries(input.columns).flatMap(([name, cell]) =>
-              unusual(
-                cell,
-                key,
-                input.kind === 'rows' ? `${cell.label} in ${input.row} ${i + 1}` : cell.label,
-                row[name],
+        : input.kind === 'runs'
+          ? runsOf(given[key]).flatMap((run) =>
+              run.flatMap((value, i) => unusual(numberOf(input, i), key, numberOf(input, i).label, value)),
+            )
+          : rowsOf(given[key]).flatMap((row, i) =>
+              Object.entries(input.columns).flatMap(([name, cell]) =>
+                unusual(
+                  cell,
+                  key,
+                  input.kind === 'rows' ? `${cell.label} in ${input.row} ${i + 1}` : cell.label,
+                  row[name],
+                ),
               ),
             ),
-          ),
   )
 
 const worstFirst = { stop: 0, check: 1, note: 2 }

@@ -64,6 +64,9 @@ const cellOf = (input: Input, index: number | undefined, column: string | undefi
       return column !== undefined && Object.hasOwn(input.columns, column) ? input.columns[column] : undefined
     case 'series':
       return column === undefined ? numberOf(input, index ?? 0) : undefined
+    case 'runs':
+      // Their spread is their uncertainty.
+      return undefined
     default:
       return column === undefined ? input : undefined
   }

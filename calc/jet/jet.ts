@@ -154,6 +154,33 @@ export const jet = defineCalculator({
       : []),
   ],
   doesNotCheck: ['whether the runner can pass a jet this thick', 'whether the stream and the pipe can give this flow'],
+  example: {
+    say: 'Over Quern: two jets share the water.',
+    inputs: {
+      netHead: 97,
+      velocityCoefficient: 0.97,
+      contractionCoefficient: 1,
+      jetCount: 2,
+      flow: 0.0136,
+      waterTemperature: 6,
+    },
+  },
+  plots: [
+    {
+      say: 'The higher the head, the thinner the jet for the same flow.',
+      of: 'jetDiameter',
+      against: 'netHead',
+      from: 0.2,
+      to: 2.5,
+    },
+    {
+      say: 'Through one nozzle the flow goes with the root of the head.',
+      of: 'flow',
+      against: 'netHead',
+      from: 0.2,
+      to: 2.5,
+    },
+  ],
   sources: [
     {
       author: 'K. Subramanya',

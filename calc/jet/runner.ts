@@ -243,6 +243,26 @@ export const runner = defineCalculator({
     'whether the alternator gives its voltage at this speed',
     'efficiency',
   ],
+  example: {
+    say: 'Over Quern: a runner for its jets, turning an alternator of 1500 rev/min by its own shaft.',
+    inputs: {
+      netHead: 97,
+      velocityCoefficient: 0.97,
+      speedRatio: 0.46,
+      speed: 1500,
+      jetDiameter: 0.0142,
+      powerPerJet: 5900,
+    },
+  },
+  plots: [
+    {
+      say: 'Twice the pitch circle, half the turns.',
+      of: 'speed',
+      against: 'pitchDiameter',
+      from: 0.4,
+      to: 2.5,
+    },
+  ],
   sources: [
     {
       author: 'A. V. Arasu',

@@ -25,7 +25,12 @@ export const askedOutput = ({ calculator: id, ask }: Pick<Asked, 'calculator' | 
 }
 
 /** Whether numbers of two quantities may stand for each other, as those of a head and a length. */
-const sameDimension = (a: Quantity, b: Quantity): boolean => conversion(a, quantities[b].si) !== undefined
+const sameDimension = (a: Quantity, b: Quantity): boolean => {
+  const [one, other] = [quantities[a].si, quantities[b].si]
+  return one.mathjs === undefined || other.mathjs === undefined
+    ? one.name === other.name
+    : conversion(a, other) !== undefined
+}
 
 /** Reads what is written for a number or a choice of a calculator. Throws a RangeError that says what to write instead. */
 export const readCell = (cell: Cell, written: PlainValue): PlainValue => {
@@ -78,6 +83,8 @@ const resolveInput = (question: NumbersQuestion, input: Input, literal: Literal,
   if (input.kind === 'group') return row(input.columns, written)
   if (!Array.isArray(written)) throw new RangeError(`${input.label} wants a list.`)
   if (input.kind === 'rows') return written.map((one) => row(input.columns, one))
+  if (input.kind === 'runs')
+    throw new RangeError(`${input.label} cannot be asked in a question: it takes lists of lists.`)
   const cell = seriesCell(input)
   return written.map((one) => resolveCell(question, cell, one, named) as number)
 }

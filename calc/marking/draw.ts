@@ -49,7 +49,7 @@ class Redraw extends Error {}
 
 /** The quantity that a variable has where it is put into an input. */
 const quantityIn = (input: Input | undefined, literal: Literal | undefined, name: string): Quantity | undefined => {
-  if (input === undefined || input.kind === 'choice' || literal === undefined) return undefined
+  if (input === undefined || input.kind === 'choice' || input.kind === 'runs' || literal === undefined) return undefined
   if (input.kind === 'scalar') return literal === name ? input.quantity : undefined
   const rows: Literal[] = Array.isArray(literal) ? literal : [literal]
   if (input.kind === 'series') return rows.includes(name) ? input.quantity : undefined

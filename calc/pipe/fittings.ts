@@ -325,6 +325,21 @@ export const fittings = defineCalculator({
     'fittings close behind each other, which take more or less than their sum',
     'friction in the straight pipe: see friction',
   ],
+  example: {
+    say: 'Sorrelthwaite: from the forebay’s sharp mouth to the ball valve at the wall.',
+    inputs: {
+      flow: 0.021,
+      insideDiameter: 0.1544,
+      fittings: [
+        { kind: 'entrance-sharp', count: 1 },
+        { kind: 'swept-bend', count: 2, bendAngle: 30, radiusRatio: 8 },
+        { kind: 'elbow-45', count: 1, joint: 'fused' },
+        { kind: 'taper-contraction', count: 1, diameterRatio: 0.7, coneAngle: 20 },
+        { kind: 'ball-valve', count: 1 },
+      ],
+      frictionFactor: 0.018,
+    },
+  },
   sources: [
     { author: 'Crane Co.', title: 'Flow of Fluids through Valves, Fittings and Pipe, TP-410', year: 1982 },
     {

@@ -170,6 +170,19 @@ export const friction = defineCalculator({
     'the pressure in the pipe, standing or in a surge',
     'air, silt or ice in the pipe',
   ],
+  example: {
+    say: 'Over Quern: the long upper pipe, some years in service.',
+    inputs: { flow: 0.0172, insideDiameter: 0.1322, length: 640, roughness: 1e-4, waterTemperature: 6 },
+  },
+  plots: [
+    {
+      say: 'A little more bore saves much: the loss goes with nearly the fifth power of the diameter.',
+      of: 'headLoss',
+      against: 'insideDiameter',
+      from: 0.75,
+      to: 1.6,
+    },
+  ],
   sources: [
     {
       author: 'C. F. Colebrook',

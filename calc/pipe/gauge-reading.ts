@@ -241,6 +241,19 @@ export const gaugeReading = defineCalculator({
     'losses between the gauge and the jet',
     'whether the pipe holds these pressures',
   ],
+  example: {
+    say: 'Sorrelthwaite after leaf fall: the static reading is right, and less power comes.',
+    inputs: {
+      staticPressure: 3.29e5,
+      runningPressure: 2.71e5,
+      insideDiameter: 0.1544,
+      flow: 0.021,
+      predictedLoss: 2.1,
+      predictedStatic: 3.29e5,
+      expectedPower: 3900,
+      measuredPower: 2900,
+    },
+  },
   sources: [
     {
       author: 'R. W. Fox, A. T. McDonald',

@@ -287,6 +287,24 @@ export const penstock = defineCalculator({
     'whether the stream and the intake can give this flow',
     'whether the intake draws air',
   ],
+  example: {
+    say: 'Over Quern: two sizes of pipe and two nozzles, the first half of the way nearly flat.',
+    inputs: {
+      grossHead: 104,
+      sections: [
+        { length: 420, insideDiameter: 0.1322, roughness: 5e-5, totalK: 1.1, parallel: 1 },
+        { length: 310, insideDiameter: 0.1108, roughness: 5e-5, totalK: 0.6, parallel: 1 },
+      ],
+      nozzles: { count: 2, diameter: 0.0145, dischargeCoefficient: 0.94 },
+      profile: [
+        { distance: 0, elevation: 103.2 },
+        { distance: 420, elevation: 84 },
+        { distance: 600, elevation: 22 },
+        { distance: 730, elevation: 0 },
+      ],
+      waterTemperature: 6,
+    },
+  },
   sources: [
     {
       author: 'C. F. Colebrook',

@@ -142,6 +142,10 @@ export const flowByBucket = defineCalculator({
     },
   ],
   doesNotCheck: ['whether all of the stream runs into the vessel', 'whether today is like the rest of the year'],
+  example: {
+    say: 'A side stream at Over Quern, led into a barrel of 120 litres.',
+    inputs: { volume: 0.12, times: [14.6, 15.1, 14.4, 14.9], volumeUncertainty: 0.002 },
+  },
   sources: [
     {
       author: 'JCGM',

@@ -72,6 +72,10 @@ export const headByGauge = defineCalculator({
       : []),
   ],
   doesNotCheck: ['whether air is locked in a hump of the hose: it reads low', 'whether the gauge reads true'],
+  example: {
+    say: 'Over Quern: a hose laid down the gill, its gauge read a metre and a half over the jet.',
+    inputs: { staticPressure: 9.86e5, gaugeHeightAboveDatum: 1.5, waterTemperature: 6 },
+  },
   sources: [
     { author: 'F. M. White', title: 'Fluid Mechanics', year: 2011, where: 'hydrostatic pressure (from memory)' },
   ],

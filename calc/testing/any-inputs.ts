@@ -1,5 +1,6 @@
 import fc from 'fast-check'
 import type { CalculatorDefinition, Cell, Columns, Input, Inputs, InputValue, PlainRow, Scalar } from '../definition.ts'
+import { hasPlace } from '../check.ts'
 import { initialInputs } from '../initial.ts'
 import { logUniform, uniform } from './properties.ts'
 
@@ -20,9 +21,13 @@ const anyCell = (cell: Cell): fc.Arbitrary<number | string> =>
   cell.kind === 'choice' ? fc.constantFrom(...cell.of) : anyNumber(cell)
 
 const anyRow = (columns: Columns): fc.Arbitrary<PlainRow> =>
-  fc.record(Object.fromEntries(Object.entries(columns).map(([key, cell]) => [key, anyCell(cell)])), {
-    requiredKeys: Object.keys(columns).filter((key) => !columns[key]!.optional && columns[key]!.fallback === undefined),
-  })
+  fc
+    .record(Object.fromEntries(Object.entries(columns).map(([key, cell]) => [key, anyCell(cell)])), {
+      requiredKeys: Object.keys(columns).filter(
+        (key) => !columns[key]!.optional && columns[key]!.fallback === undefined,
+      ),
+    })
+    .map((row) => Object.fromEntries(Object.entries(row).filter(([key]) => hasPlace(columns[key]!, columns, row))))
 
 const anyValue = (input: Input): fc.Arbitrary<InputValue> => {
   switch (input.kind) {
@@ -41,6 +46,14 @@ const anyValue = (input: Input): fc.Arbitrary<InputValue> => {
         minLength: input.least,
         maxLength: Math.min(input.most, input.least + longest),
       })
+    case 'runs':
+      return fc.array(
+        fc.array(anyNumber(input), {
+          minLength: input.leastEach,
+          maxLength: Math.min(input.mostEach, input.leastEach + longest),
+        }),
+        { minLength: input.least, maxLength: Math.min(input.most, input.least + longest) },
+      )
   }
 }
 
@@ -59,7 +72,12 @@ export const choose = (
     const byAlternative = first === undefined || (first === key) === coins[first]
     const byCompany = (goesWith === undefined || isGiven(goesWith)) && (needs === undefined || isGiven(needs))
     const mayMiss = optional === true || needs !== undefined || ('fallback' in input && input.fallback !== undefined)
-    return byAlternative && byCompany && (or !== undefined || !mayMiss || coins[key]!)
+    return (
+      byAlternative &&
+      byCompany &&
+      hasPlace(inputs[key]!, inputs, values) &&
+      (or !== undefined || !mayMiss || coins[key]!)
+    )
   }
   return Object.fromEntries(keys.filter(isGiven).map((key) => [key, values[key]]))
 }
@@ -97,6 +115,8 @@ const nearby = (definition: CalculatorDefinition): fc.Arbitrary<Inputs> =>
             return [key, (value as readonly PlainRow[]).map((row) => shiftRow(input.columns, row))]
           case 'series':
             return [key, (value as readonly number[]).map((item) => shift(item, input))]
+          case 'runs':
+            return [key, (value as readonly (readonly number[])[]).map((run) => run.map((item) => shift(item, input)))]
         }
       }),
     )

@@ -113,6 +113,7 @@ export const quantities: Readonly<Record<Quantity, QuantityInfo>> = {
       { name: 'kPa', mathjs: 'kPa' },
       { name: 'MPa', mathjs: 'MPa' },
       { name: 'psi', mathjs: 'psi' },
+      { name: 'GPa', mathjs: 'GPa' },
       { name: 'mbar', mathjs: 'mbar' },
       { name: 'Pa', mathjs: 'Pa' },
     ],
@@ -196,6 +197,128 @@ export const quantities: Readonly<Record<Quantity, QuantityInfo>> = {
   },
   ratio: { words: 'a number', si: plain, units: [plain], example: '0.97' },
   count: { words: 'a number', si: plain, units: [plain], example: '2' },
+  mass: {
+    words: 'a mass',
+    si: { name: 'kg', mathjs: 'kg' },
+    units: [
+      { name: 'kg', mathjs: 'kg' },
+      { name: 'g', mathjs: 'g' },
+      { name: 't', mathjs: 'tonne', from: 1000 },
+      { name: 'lb', mathjs: 'lbm' },
+    ],
+    example: '2.5 kg',
+  },
+  force: {
+    words: 'a force',
+    si: { name: 'N', mathjs: 'N' },
+    units: [
+      { name: 'N', mathjs: 'N' },
+      { name: 'kN', mathjs: 'kN', from: 1000 },
+      { name: 'lbf', mathjs: 'lbf' },
+    ],
+    example: '3.1 kN',
+  },
+  temperatureDifference: {
+    words: 'a difference of temperature',
+    si: { name: 'K', factor: 1 },
+    units: [{ name: 'K', factor: 1 }],
+    example: '15 K',
+  },
+  voltage: { words: 'a voltage', si: { name: 'V', mathjs: 'V' }, units: [{ name: 'V', mathjs: 'V' }], example: '48 V' },
+  current: { words: 'a current', si: { name: 'A', mathjs: 'A' }, units: [{ name: 'A', mathjs: 'A' }], example: '16 A' },
+  resistance: {
+    words: 'a resistance',
+    si: { name: 'Ω', mathjs: 'ohm' },
+    units: [
+      { name: 'Ω', mathjs: 'ohm' },
+      { name: 'mΩ', factor: 0.001 },
+    ],
+    example: '0.4 Ω',
+  },
+  resistancePerMetre: {
+    words: 'a resistance of each metre',
+    si: { name: 'Ω/m', factor: 1 },
+    units: [
+      { name: 'Ω/km', factor: 0.001 },
+      { name: 'Ω/m', factor: 1 },
+    ],
+    example: '1.15 Ω/km',
+  },
+  /** As cable tables print it: the calculators take it so. */
+  resistancePerKm: {
+    words: 'a resistance of each kilometre',
+    si: { name: 'Ω/km', factor: 1 },
+    units: [{ name: 'Ω/km', factor: 1 }],
+    example: '1.15 Ω/km',
+  },
+  /** As cable is sold: the calculators take it so. */
+  conductorArea: {
+    words: 'a cross-section',
+    si: { name: 'mm²', mathjs: 'mm^2' },
+    units: [{ name: 'mm²', mathjs: 'mm^2' }],
+    example: '16 mm²',
+  },
+  frequency: {
+    words: 'a frequency',
+    si: { name: 'Hz', mathjs: 'Hz' },
+    units: [{ name: 'Hz', mathjs: 'Hz' }],
+    example: '50 Hz',
+  },
+  voltsPerThousandRpm: {
+    words: 'a voltage at 1000 rev/min',
+    si: { name: 'V per 1000 rev/min', factor: 1 },
+    units: [{ name: 'V per 1000 rev/min', factor: 1 }],
+    example: '38 V per 1000 rev/min',
+  },
+  /** As meters show it: the calculators take it so. */
+  conductivity: {
+    words: 'a conductivity',
+    si: { name: 'µS/cm', factor: 1 },
+    units: [
+      { name: 'µS/cm', factor: 1 },
+      { name: 'mS/cm', factor: 1000 },
+    ],
+    example: '120 µS/cm',
+  },
+  saltCalibration: {
+    words: 'a calibration',
+    si: { name: 'mg/L per µS/cm', factor: 1 },
+    units: [{ name: 'mg/L per µS/cm', factor: 1 }],
+    example: '0.5 mg/L per µS/cm',
+  },
+  weirCoefficient: {
+    words: 'a weir coefficient',
+    si: { name: 'm^½/s', factor: 1 },
+    units: [{ name: 'm^½/s', factor: 1 }],
+    example: '1.7 m^½/s',
+  },
+  years: {
+    words: 'a number of years',
+    si: { name: 'years', factor: 1 },
+    units: [{ name: 'years', factor: 1 }],
+    example: '20 years',
+  },
+  /** Hours of a day or a year, as people count them. */
+  hours: {
+    words: 'a number of hours',
+    si: { name: 'h', factor: 1 },
+    units: [{ name: 'h', factor: 1 }],
+    example: '4 h',
+  },
+  /** In whatever currency the prices are. */
+  money: { words: 'an amount of money', si: plain, units: [plain], example: '2400' },
+  pricePerKwh: {
+    words: 'a price for each kWh',
+    si: { name: 'per kWh', factor: 1 },
+    units: [{ name: 'per kWh', factor: 1 }],
+    example: '0.24 per kWh',
+  },
+  pricePerMetre: {
+    words: 'a price for each metre',
+    si: { name: 'per m', factor: 1 },
+    units: [{ name: 'per m', factor: 1 }],
+    example: '18 per m',
+  },
 }
 
 /** The unit library knows turns only as hertz. */

@@ -91,6 +91,14 @@ export const power = defineCalculator({
     'whether the stream can give this flow, or whether you may take it: a licence may be needed',
     'what the pipe takes from the fall: the head is the net head',
   ],
+  example: {
+    say: 'Sorrelthwaite: a mill leat’s old fall, with the losses of a good small set.',
+    inputs: { flow: 0.021, netHead: 31.5, efficiency: 0.62, waterTemperature: 8 },
+  },
+  plots: [
+    { say: 'Power goes straight with the head.', of: 'outputPower', against: 'netHead', from: 0, to: 2 },
+    { say: 'And straight with the flow.', of: 'outputPower', against: 'flow', from: 0, to: 2 },
+  ],
   sources: [
     {
       author: 'Y. A. Çengel, J. M. Cimbala',

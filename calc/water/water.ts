@@ -111,6 +111,10 @@ export const water = defineCalculator({
     },
   ],
   doesNotCheck: ['silt, salt or air in the water', 'pressures far above one atmosphere'],
+  example: {
+    say: 'The leat at Over Quern under a March sky.',
+    inputs: { waterTemperature: 4 },
+  },
   sources: [
     {
       author: 'M. Tanaka, G. Girard, R. Davis, A. Peuto, N. Bignell',

@@ -18,8 +18,8 @@ const ofCell = (cell: Cell): SchemaObject =>
         ...(cell.fallback === undefined ? {} : { default: cell.fallback }),
       }
 
-const mayMiss = ({ optional, or, goesWith, needs }: Input | Cell): boolean =>
-  Boolean(optional ?? or ?? goesWith ?? needs)
+const mayMiss = ({ optional, or, goesWith, needs, when }: Input | Cell): boolean =>
+  Boolean(optional ?? or ?? goesWith ?? needs ?? when)
 
 const ofColumns = (columns: Columns): SchemaObject => ({
   type: 'object',
@@ -43,6 +43,19 @@ const ofInput = (input: Input): SchemaObject => {
       minItems: input.least,
       maxItems: input.most,
       items: ofCell(numberOf(input, 0)),
+      description: input.label,
+    }
+  if (input.kind === 'runs')
+    return {
+      type: 'array',
+      minItems: input.least,
+      maxItems: input.most,
+      items: {
+        type: 'array',
+        minItems: input.leastEach,
+        maxItems: input.mostEach,
+        items: ofCell(numberOf(input, 0)),
+      },
       description: input.label,
     }
   if (input.kind === 'group') return { ...ofColumns(input.columns), description: input.label }
