@@ -6,9 +6,17 @@ import tseslint from 'typescript-eslint'
 const boundary = (files, patterns, ignores = []) => ({
   files,
   ignores,
-  rules: { 'no-restricted-imports': ['error', { patterns }] },
+  rules: { '@typescript-eslint/no-restricted-imports': ['error', { patterns }] },
 })
 const never = (regex, message) => ({ regex, message })
+
+const wholeLibrary = {
+  ...never(
+    '^#calc/(index|solve|calculators)\\.ts$',
+    'The registry brings every calculator: a browser loads each by itself (lib/load-calculator.ts).',
+  ),
+  allowTypeImports: true,
+}
 
 const crossesFolders = never(
   '^(\\.\\./)+(calc|content|api|site)/',
@@ -63,15 +71,18 @@ export default tseslint.config(
     [
       crossesFolders,
       never('^#api/(?!.*dto/.*\\.schema\\.ts$)', 'site shares only the request and response schemas of the server.'),
+      wholeLibrary,
       never('^#calc/marking', 'answers and mistakes never reach the browser.'),
       never('question-bank|\\.questions\\.yaml', 'banks never reach the browser.'),
     ],
+    ['**/*.test.{ts,tsx}'],
   ),
   boundary(
     ['site/src/features/**/*.{ts,tsx}'],
     [
       crossesFolders,
       never('^#api/(?!.*dto/.*\\.schema\\.ts$)', 'site shares only the request and response schemas of the server.'),
+      wholeLibrary,
       never('^#calc/marking', 'answers and mistakes never reach the browser.'),
       never('question-bank|\\.questions\\.yaml', 'banks never reach the browser.'),
       never(
@@ -79,5 +90,6 @@ export default tseslint.config(
         'features do not import each other: move what two need to components or lib.',
       ),
     ],
+    ['**/*.test.{ts,tsx}'],
   ),
 )

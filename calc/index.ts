@@ -1,8 +1,9 @@
 /** The library's public entry. */
 export { calculators, type CalculatorId } from './calculators.ts'
 export { CalculationError, type CalculationErrorCode } from './errors.ts'
-export { calculate, calculator, solve, type Solution } from './solve.ts'
-export { monteCarlo, withUncertainty, type StandardUncertainties } from './uncertainty.ts'
+export { calculate, calculator, monteCarlo, solve, withUncertainty } from './solve.ts'
+export type { Solution } from './solve-definition.ts'
+export type { StandardUncertainties } from './uncertainty.ts'
 export type { PrintedStep } from './print.ts'
 export type {
   CalculatorDefinition,

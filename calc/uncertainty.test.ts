@@ -1,9 +1,8 @@
 import { describe, expect, test } from 'vitest'
-import { calculate } from './solve.ts'
+import { calculate, monteCarlo, withUncertainty } from './solve.ts'
 import { expectNear } from './testing/near.ts'
 import { outside } from './testing/outside-check.ts'
 import { expectRefusal } from './testing/refusal.ts'
-import { monteCarlo, withUncertainty } from './uncertainty.ts'
 
 const power = { flow: 0.0095, netHead: 43, efficiency: 0.55 }
 const powerUncertainty = { flow: 0.03 * 0.0095, netHead: 0.01 * 43, efficiency: 0.02 * 0.55 }

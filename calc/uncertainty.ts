@@ -9,7 +9,7 @@ import {
 } from './definition.ts'
 import { CalculationError } from './errors.ts'
 import { normalPair, seededRandom } from './numeric/random.ts'
-import { calculate, calculator } from './solve.ts'
+import { calculateDefinition } from './solve-definition.ts'
 
 /** Standard uncertainties by field: `flow`, `sections[0].length`, `nozzles.diameter`. SI. */
 export type StandardUncertainties = Readonly<Record<string, number>>
@@ -95,8 +95,8 @@ const replace = (inputs: Inputs, { key, index, column }: Field, value: number): 
   }
 }
 
-const findFields = (id: string, inputs: Inputs, uncertainties: StandardUncertainties): Field[] =>
-  Object.entries(uncertainties).map(([name, uncertainty]) => findField(calculator(id), inputs, name, uncertainty))
+const findFields = (definition: CalculatorDefinition, inputs: Inputs, uncertainties: StandardUncertainties): Field[] =>
+  Object.entries(uncertainties).map(([name, uncertainty]) => findField(definition, inputs, name, uncertainty))
 
 const scalarKeys = (outputs: Outputs): string[] =>
   Object.keys(outputs).filter((key) => typeof outputs[key] === 'number')
@@ -106,7 +106,7 @@ const relativeStep = 1e-4
 
 /** How much each scalar output changes with one field: a central difference, one-sided at the end of a range or of what has a solution. */
 const sensitivities = (
-  id: string,
+  definition: CalculatorDefinition,
   inputs: Inputs,
   field: Field,
   outputs: Outputs,
@@ -117,7 +117,7 @@ const sensitivities = (
   const here = { value: field.value, outputs }
   const at = (value: number) => {
     try {
-      return { value, outputs: calculate(id, replace(inputs, field, value)) }
+      return { value, outputs: calculateDefinition(definition, replace(inputs, field, value)) }
     } catch (error) {
       if (error instanceof CalculationError) return here
       throw error
@@ -141,7 +141,7 @@ const sensitivities = (
   )
 }
 
-export interface UncertainOutput {
+export interface Uncertain {
   value: number
   standardUncertainty: number
   /** Each field's part of the variance, 0–1; they sum to 1 unless the uncertainty is 0. */
@@ -152,16 +152,16 @@ export interface UncertainOutput {
  * Combined standard uncertainty of each scalar output by the law of propagation of uncertainty for independent inputs
  * (JCGM 100:2008, 5.1.2), with numerical sensitivities. Throws `CalculationError` for bad inputs or unknown fields.
  */
-export const withUncertainty = (
-  id: string,
+export const uncertaintyOf = (
+  definition: CalculatorDefinition,
   inputs: Inputs,
   standardUncertainties: StandardUncertainties,
-): { outputs: Record<string, UncertainOutput> } => {
-  const outputs = calculate(id, inputs)
+): { outputs: Record<string, Uncertain> } => {
+  const outputs = calculateDefinition(definition, inputs)
   const keys = scalarKeys(outputs)
-  const parts = findFields(id, inputs, standardUncertainties)
+  const parts = findFields(definition, inputs, standardUncertainties)
     .filter((field) => field.uncertainty > 0)
-    .map((field) => ({ field, slopes: sensitivities(id, inputs, field, outputs, keys) }))
+    .map((field) => ({ field, slopes: sensitivities(definition, inputs, field, outputs, keys) }))
   return {
     outputs: Object.fromEntries(
       keys.map((key) => {
@@ -188,19 +188,31 @@ export interface SampledOutput {
   /** Probabilistically symmetric (JCGM 101:2008, 7.7). */
   interval95: [number, number]
 }
+export interface Sampled {
+  outputs: Record<string, SampledOutput>
+  /** Draws that lay outside what can be worked out. */
+  redrawn: number
+}
+export interface Sampling {
+  trials: number
+  seed: string | number
+  /** Told now and then how many trials are done. */
+  onProgress?: (done: number) => void
+}
+const progressEvery = 500
 
 /**
  * Propagation of distributions by Monte Carlo (JCGM 101:2008): every field normal about its value. Draws that the calculator refuses, or
  * that lie outside a range, are drawn again and counted in `redrawn`. The same seed gives the same result.
  */
-export const monteCarlo = (
-  id: string,
+export const monteCarloOf = (
+  definition: CalculatorDefinition,
   inputs: Inputs,
   standardUncertainties: StandardUncertainties,
-  { trials, seed }: { trials: number; seed: string | number },
-): { outputs: Record<string, SampledOutput>; redrawn: number } => {
-  const keys = scalarKeys(calculate(id, inputs))
-  const fields = findFields(id, inputs, standardUncertainties)
+  { trials, seed, onProgress }: Sampling,
+): Sampled => {
+  const keys = scalarKeys(calculateDefinition(definition, inputs))
+  const fields = findFields(definition, inputs, standardUncertainties)
   const random = seededRandom(String(seed))
   const samples = new Map(keys.map((key) => [key, [] as number[]]))
   const mostRedraws = 100 * trials
@@ -210,7 +222,7 @@ export const monteCarlo = (
     for (const field of fields) drawn = replace(drawn, field, field.value + field.uncertainty * normalPair(random)[0])
     let outputs: Outputs
     try {
-      outputs = calculate(id, drawn)
+      outputs = calculateDefinition(definition, drawn)
     } catch (error) {
       if (!(error instanceof CalculationError)) throw error
       if (++redrawn > mostRedraws)
@@ -226,6 +238,7 @@ export const monteCarlo = (
       if (typeof value === 'number') samples.get(key)!.push(value)
     }
     trial++
+    if (trial % progressEvery === 0) onProgress?.(trial)
   }
   return {
     outputs: Object.fromEntries(

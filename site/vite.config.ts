@@ -7,6 +7,7 @@ import remarkGfm from 'remark-gfm'
 import remarkMath from 'remark-math'
 import remarkMdxFrontmatter from 'remark-mdx-frontmatter'
 import { defineConfig } from 'vite'
+import { calculatorIndex } from './scripts/calculator-index.ts'
 import { lessonIndex } from './scripts/lesson-index.ts'
 import { rehypeBareMath } from './src/mdx/rehype-bare-math.ts'
 import { remarkContents } from './src/mdx/remark-contents.ts'
@@ -20,12 +21,15 @@ function lessonChunk(module: string | null) {
   return lesson && `lessons/${course}/${lesson}-[hash].js`
 }
 
-/** The arithmetic and its units, which no page needs before its first paint. */
+/** What every calculator needs and no page before its first paint: units, checking, printing. Each calculator is a chunk of its own. */
 const isCalculation = (module: string) =>
-  module.startsWith(folder('../calc/')) || module.includes('/node_modules/mathjs/')
+  module.includes('/node_modules/mathjs/') ||
+  [folder('../calc/units/'), folder('../calc/numeric/')].some((part) => module.startsWith(part)) ||
+  (module.startsWith(folder('../calc/')) && !module.slice(folder('../calc/').length).includes('/'))
 
 export default defineConfig(({ isSsrBuild }) => ({
   plugins: [
+    calculatorIndex(folder('../calc')),
     lessonIndex(folder('../content')),
     {
       enforce: 'pre',
@@ -53,7 +57,7 @@ export default defineConfig(({ isSsrBuild }) => ({
         ? { entryFileNames: 'entry-server.js' }
         : {
             chunkFileNames: (chunk) => lessonChunk(chunk.facadeModuleId) ?? 'assets/[name]-[hash].js',
-            codeSplitting: { groups: [{ name: 'calculators', test: isCalculation }] },
+            codeSplitting: { groups: [{ name: 'calculation', test: isCalculation }] },
           },
     },
   },

@@ -54,12 +54,14 @@ const chunks = filesIn('assets', '.js')
 
 /** The chunk that this file of ours was built into, as its source map tells. */
 function chunkOf(source: string): string {
-  const found = chunks.find((chunk) => {
+  return findChunk(source) ?? stop(`No chunk of the built site holds ${source}.`)
+}
+function findChunk(source: string): string | undefined {
+  return chunks.find((chunk) => {
     if (!existsSync(path.join(built, `${chunk}.map`))) return false
     const { sources } = JSON.parse(textOf(`${chunk}.map`)) as { sources: string[] }
     return sources.some((one) => one.endsWith(`/${source}`))
   })
-  return found ?? stop(`No chunk of the built site holds ${source}.`)
 }
 
 let isMissed = false
@@ -76,17 +78,23 @@ if ([...atOnce].some((file) => textOf(file).includes('jsxDEV')))
   stop('dist/site was built for development (NODE_ENV was set): npm run build:site without NODE_ENV makes it anew.')
 
 const firstPage = withImports([chunkOf('site/src/routes/home.tsx')], new Set(atOnce))
-const moreThanFirstPage = (source: string) => [...withImports([chunkOf(source)])].filter((file) => !firstPage.has(file))
+const moreThanFirstPage = (sources: readonly string[]) =>
+  [...withImports(sources.flatMap((source) => findChunk(source) ?? []))].filter((file) => !firstPage.has(file))
 
 console.log('Scripts, gzipped')
 row('first page', sum(firstPage), figures.firstPage)
 row('  of it loaded by index.html itself', sum(atOnce))
-row(
-  'a calculator, more than that',
-  sum(moreThanFirstPage('site/src/features/calculators/Calculator.tsx')),
-  figures.calculator,
-)
-row('  of it arithmetic and units', gzipped(chunkOf('calc/solve.ts')))
+const frame = 'site/src/features/calculators/Calculator.tsx'
+row('what every calculator needs, more than that', sum(moreThanFirstPage([frame])))
+row('  of it checking, units and printing', gzipped(chunkOf('calc/solve-definition.ts')))
+const registry = readFileSync(fileURLToPath(new URL('../../calc/calculators.ts', import.meta.url)), 'utf8')
+const weighed = [...registry.matchAll(/from '\.\/([\w/-]+\/([\w-]+)\.ts)'/g)].map(([, file, id]) => {
+  const drawing = `${id!.replace(/(?:^|-)([a-z])/g, (_, letter: string) => letter.toUpperCase())}Drawing.tsx`
+  const parts = [frame, `calc/${file}`, `site/src/features/calculators/drawings/${drawing}`]
+  return { id: id!, bytes: sum(moreThanFirstPage(parts)) }
+})
+const heaviest = weighed.sort((a, b) => b.bytes - a.bytes)[0]!
+row(`the heaviest calculator, ${heaviest.id}, drawing and all`, heaviest.bytes, figures.calculator)
 row('KaTeX, only where a formula changes', gzipped(chunkOf('katex/dist/katex.mjs')))
 
 console.log('\nLessons, gzipped')

@@ -1,4 +1,4 @@
-import { calculators } from '#calc/index.ts'
+import { calculatorIndex } from 'virtual:calculator-index'
 import { courses, isPublic } from './lib/course-structure.ts'
 
 /** Pages that say the same to everyone, rendered at build. A paid lesson is not among them. */
@@ -11,7 +11,7 @@ export const publicPaths = () => [
       course.lessons.filter(({ open }) => open).map(({ slug }) => `/courses/${course.slug}/${slug}`),
     ),
   '/calculators',
-  ...Object.keys(calculators).map((id) => `/calculators/${id}`),
+  ...calculatorIndex.map(({ id }) => `/calculators/${id}`),
   '/sign-in',
   '/sign-up',
   '/forgotten-password',

@@ -2,6 +2,7 @@ import { useState, type ReactNode } from 'react'
 import type { PrintedStep } from '#calc/index.ts'
 import { Working } from '../components/Working.tsx'
 import { saidOutput } from '../features/calculators/results.ts'
+import { useCalculator } from '../lib/load-calculator.ts'
 import type { Attributes } from './attributes.ts'
 import { Blank } from './Blank.tsx'
 import { ExampleFrame } from './ExampleFrame.tsx'
@@ -17,7 +18,8 @@ interface FadedExampleProps {
 
 /** The working of a calculator with steps left blank. A step's numbers are shown once every blank up to it is filled. */
 export default function FadedExample({ id, blank, children, ...attributes }: FadedExampleProps) {
-  const { definition, given, working, outputs } = workOut(id, attributes as Attributes, children)
+  const definition = useCalculator(id)
+  const { given, working, outputs } = workOut(definition, attributes as Attributes, children)
   const [filled, setFilled] = useState<readonly string[]>([])
   const blanks = blank.split(/\s+/)
   const isBlank = ({ gives }: PrintedStep) => gives !== undefined && blanks.includes(gives)

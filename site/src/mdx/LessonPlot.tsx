@@ -2,6 +2,7 @@ import type { ReactNode } from 'react'
 import type { CalculatorDefinition } from '#calc/index.ts'
 import { parse } from '#calc/units/parse.ts'
 import { Plot } from '../components/Plot.tsx'
+import { useCalculator } from '../lib/load-calculator.ts'
 import type { Attributes } from './attributes.ts'
 import { workOut } from './example.ts'
 
@@ -27,11 +28,12 @@ const multiple = ({ inputs }: CalculatorDefinition, key: string, text: string | 
 
 /** How one output of a calculator goes with one input, around the lesson's numbers. */
 export default function LessonPlot({ id, output, input, from, to, children, ...attributes }: LessonPlotProps) {
-  const { definition, inputs } = workOut(id, attributes as Attributes, children)
+  const definition = useCalculator(id)
+  const { inputs } = workOut(definition, attributes as Attributes, children)
   const now = inputs[input]
   return (
     <Plot
-      id={id}
+      definition={definition}
       inputs={inputs}
       of={output}
       against={input}

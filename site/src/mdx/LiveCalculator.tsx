@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react'
-import { calculator } from '#calc/index.ts'
 import { Plot } from '../components/Plot.tsx'
 import { Calculator } from '../features/calculators/Calculator.tsx'
+import { useCalculator } from '../lib/load-calculator.ts'
 import { textsFrom, type Attributes } from './attributes.ts'
 
 interface LiveCalculatorProps {
@@ -18,14 +18,19 @@ const key = (words: string) => words.replace(/-([a-z])/g, (_, letter: string) =>
 
 /** A calculator in a lesson, set to the lesson's numbers. */
 export default function LiveCalculator({ id, show, plot, children, ...attributes }: LiveCalculatorProps) {
+  const definition = useCalculator(id)
   const [of, against] = plot?.split('-against-').map(key) ?? []
   return (
     <Calculator
-      id={id}
-      preset={textsFrom(calculator(id), attributes as Attributes, children)}
+      definition={definition}
+      preset={textsFrom(definition, attributes as Attributes, children)}
       show={show}
       headingLevel={3}
-      plot={of && against ? ({ inputs }) => <Plot id={id} inputs={inputs} of={of} against={against} /> : undefined}
+      plot={
+        of && against
+          ? ({ inputs }) => <Plot definition={definition} inputs={inputs} of={of} against={against} />
+          : undefined
+      }
     />
   )
 }

@@ -2,6 +2,7 @@ import type { ReactNode } from 'react'
 import type { Caution } from '#calc/index.ts'
 import { Working } from '../components/Working.tsx'
 import { Figures, Lists } from '../features/calculators/Results.tsx'
+import { useCalculator } from '../lib/load-calculator.ts'
 import type { Attributes } from './attributes.ts'
 import { ExampleFrame } from './ExampleFrame.tsx'
 import { workOut } from './example.ts'
@@ -17,7 +18,8 @@ const none: ReadonlyMap<string, readonly Caution[]> = new Map()
 
 /** The whole working of a calculator for the numbers that the lesson gives. */
 export default function WorkedExample({ id, children, ...attributes }: WorkedExampleProps) {
-  const { definition, given, working, outputs } = workOut(id, attributes as Attributes, children)
+  const definition = useCalculator(id)
+  const { given, working, outputs } = workOut(definition, attributes as Attributes, children)
   const keys = [...new Set(working.flatMap(({ gives }) => gives ?? []))]
   return (
     <ExampleFrame kind="Worked example" title={definition.title} given={given}>

@@ -1,10 +1,11 @@
+import { power } from '#calc/water/power.ts'
 import { expect, test } from 'vitest'
 import { calculator } from '#calc/index.ts'
 import { Row, textsFrom } from './attributes.ts'
 import { workOut } from './example.ts'
 
 test('a plain number is plain: an efficiency of 0.52 is not 0.52 %', () => {
-  const { inputs, given } = workOut('power', { flow: '6.8 L/s', netHead: '19 m', efficiency: 0.52 }, null)
+  const { inputs, given } = workOut(power, { flow: '6.8 L/s', netHead: '19 m', efficiency: 0.52 }, null)
   expect(inputs).toMatchObject({ flow: 0.0068, netHead: 19, efficiency: 0.52 })
   expect(given.map(({ label, text }) => `${label} ${text.replace(/\s/g, ' ')}`)).toEqual([
     'Flow 6.8 L/s',
@@ -27,5 +28,5 @@ test('rows become paths, in the order in which they stand', () => {
 })
 
 test('an example that does not work out says where', () => {
-  expect(() => workOut('power', { flow: '6.8 m', netHead: '19 m', efficiency: 0.52 }, null)).toThrow(/flow/)
+  expect(() => workOut(power, { flow: '6.8 m', netHead: '19 m', efficiency: 0.52 }, null)).toThrow(/flow/)
 })

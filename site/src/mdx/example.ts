@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react'
-import { calculator, type CalculatorDefinition, type Cell } from '#calc/index.ts'
+import type { CalculatorDefinition, Cell } from '#calc/index.ts'
 import { columnsOfRow, isMany, pathOf } from '../features/calculators/columns.ts'
 import { shownKeys, solveForm, startForm, type FieldText, type Form } from '../features/calculators/form.ts'
 import { textsFrom, type Attributes } from './attributes.ts'
@@ -32,8 +32,7 @@ function givenValues(definition: CalculatorDefinition, form: Form, isNamed: (pat
 }
 
 /** A calculation with the numbers of a lesson, worked out; throws where they do not work out, which the content's tests find. */
-export function workOut(id: string, attributes: Attributes, children: ReactNode) {
-  const definition = calculator(id)
+export function workOut(definition: CalculatorDefinition, attributes: Attributes, children: ReactNode) {
   const texts = textsFrom(definition, attributes, children)
   const form = startForm(definition, texts)
   const solved = solveForm(definition, form)
@@ -43,7 +42,6 @@ export function workOut(id: string, attributes: Attributes, children: ReactNode)
   }
   const { outputs, working } = solved.solution
   return {
-    definition,
     inputs: solved.inputs,
     given: givenValues(definition, form, (path) => path in texts),
     working,

@@ -1,12 +1,14 @@
 import { useSyncExternalStore } from 'react'
-import { Link, useLocation, useNavigate, useParams } from 'react-router-dom'
-import { calculators, type CalculatorDefinition } from '#calc/index.ts'
+import { Link, useLoaderData, useLocation, useNavigate, type LoaderFunctionArgs } from 'react-router-dom'
+import type { CalculatorDefinition } from '#calc/index.ts'
 import { Page } from '../components/Page.tsx'
 import { NotFound } from '../components/RouteError.tsx'
 import { textsIn } from '../features/calculators/address.ts'
 import { wordsOfStation } from '../features/calculators/by-station.ts'
 import { Calculator } from '../features/calculators/Calculator.tsx'
-import { CalculatorPlot } from '../features/calculators/CalculatorPlot.tsx'
+import { CalculatorPlots } from '../features/calculators/CalculatorPlots.tsx'
+import { loadDrawing } from '../features/calculators/load-drawing.ts'
+import { loadCalculator } from '../lib/load-calculator.ts'
 
 const never = () => () => undefined
 /** A page rendered at build knows no inputs: those of the address come as soon as the browser has taken it over. */
@@ -22,15 +24,18 @@ interface FormState {
   form?: string
 }
 
+export const loader = async ({ params: { id = '' } }: LoaderFunctionArgs) => {
+  const [definition] = await Promise.all([loadCalculator(id), loadDrawing(id)])
+  return definition
+}
+
 export function Component() {
-  const { id } = useParams()
-  const definition = Object.hasOwn(calculators, id!)
-    ? (calculators[id as keyof typeof calculators] as CalculatorDefinition)
-    : undefined
+  const definition = useLoaderData<CalculatorDefinition | undefined>()
   return definition ? <CalculatorPage definition={definition} /> : <NotFound>There is no calculator here.</NotFound>
 }
 
-function CalculatorPage({ definition: { id, title, summary, station } }: { definition: CalculatorDefinition }) {
+function CalculatorPage({ definition }: { definition: CalculatorDefinition }) {
+  const { id, title, summary, station } = definition
   const navigate = useNavigate()
   const location = useLocation()
   const isLive = useIsLive()
@@ -48,11 +53,20 @@ function CalculatorPage({ definition: { id, title, summary, station } }: { defin
       <p className="lead">{summary}</p>
       <Calculator
         key={isLive ? `${id} ${form}` : id}
-        id={id}
+        definition={definition}
         texts={isLive ? textsIn(location.search) : undefined}
         onSettle={write}
-        plot={(solved) => <CalculatorPlot id={id} inputs={solved.inputs} outputs={solved.solution.outputs} />}
+        plot={(solved) => <CalculatorPlots definition={definition} {...solved} />}
       />
     </div>
   )
 }
+
+/** Writing the address of the same calculator loads nothing. */
+export const shouldRevalidate = ({
+  currentParams,
+  nextParams,
+}: {
+  currentParams: { id?: string }
+  nextParams: { id?: string }
+}) => currentParams.id !== nextParams.id

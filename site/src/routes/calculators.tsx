@@ -1,5 +1,5 @@
 import { Link } from 'react-router-dom'
-import { calculators } from '#calc/index.ts'
+import { calculatorIndex } from 'virtual:calculator-index'
 import { Page } from '../components/Page.tsx'
 import '../features/calculators/calculator-list.css'
 import { byStation } from '../features/calculators/by-station.ts'
@@ -17,7 +17,7 @@ export function Component() {
         what was done with it.
       </p>
       <ol className="station-list">
-        {byStation(Object.values(calculators)).map(({ station, words, members }) => (
+        {byStation(calculatorIndex).map(({ station, words, members }) => (
           <li key={station}>
             <h2>{words}</h2>
             <ul>

@@ -1,20 +1,31 @@
 import { Button } from '@radix-ui/themes'
-import { memo, useDeferredValue, useEffect, useId, useMemo, useRef, useState, type ReactNode } from 'react'
-import { calculator } from '#calc/index.ts'
+import {
+  createElement,
+  memo,
+  use,
+  useDeferredValue,
+  useEffect,
+  useId,
+  useMemo,
+  useRef,
+  useState,
+  type ReactNode,
+} from 'react'
+import type { CalculatorDefinition } from '#calc/index.ts'
 import { UntilReady } from '../../components/UntilReady.tsx'
 import { Working } from '../../components/Working.tsx'
 import { searchOf } from './address.ts'
 import './calculators.css'
 import { CopyLink } from './CopyLink.tsx'
-import { drawings } from './drawings/drawings.ts'
 import { changeForm, solveForm, startForm, type Form, type FormAction, type Solved, type Texts } from './form.ts'
 import { InputFields } from './InputFields.tsx'
+import { loadDrawing } from './load-drawing.ts'
 import { placeCautions, summaryOf } from './results.ts'
 import { Figures, Lists } from './Results.tsx'
 import { SourcesAndLimits } from './SourcesAndLimits.tsx'
 
 export interface CalculatorProps {
-  id: string
+  definition: CalculatorDefinition
   /** Texts by path, as people write them: `flow: '9.5 L/s'`, `'sections.0.length': '120 m'`. What "Start again" goes back to. */
   preset?: Texts
   /** Texts that stand there first instead, such as those of an address. */
@@ -40,13 +51,13 @@ interface State {
 
 /** Redrawn only when there are other numbers, not with every key. */
 const LiveDrawing = memo(function LiveDrawing({ id, solved }: { id: string; solved: Solved }) {
-  const Drawing = drawings[id]
-  return Drawing && <Drawing given={solved.inputs} found={solved.solution.outputs} />
+  const Drawing = use(loadDrawing(id))
+  return Drawing && createElement(Drawing, { given: solved.inputs, found: solved.solution.outputs })
 })
 
 /** A live calculator: the fields keep what is written; everything else is worked out from them as it is drawn. */
-export function Calculator({ id, preset, texts, show, headingLevel, onSettle, plot }: CalculatorProps) {
-  const definition = calculator(id)
+export function Calculator({ definition, preset, texts, show, headingLevel, onSettle, plot }: CalculatorProps) {
+  const { id } = definition
   const [{ form, good }, setState] = useState<State>(() => {
     const form = startForm(definition, texts ?? preset)
     return { form, good: solveForm(definition, form).solution ? form : undefined }

@@ -1,4 +1,5 @@
-import type { CalculatorDefinition, Station } from '#calc/index.ts'
+import type { Station } from '#calc/index.ts'
+import type { CalculatorIndexEntry } from '../../lib/calculator-index.ts'
 
 /** The stations of the long section, from the stream to the load, as headings. */
 const stationWords: Readonly<Record<Station, string>> = {
@@ -17,12 +18,12 @@ const stationWords: Readonly<Record<Station, string>> = {
 }
 
 /** Calculators under their stations, in the order of the water; stations without one are left out. */
-export const byStation = (definitions: readonly CalculatorDefinition[]) =>
+export const byStation = (calculators: readonly CalculatorIndexEntry[]) =>
   (Object.keys(stationWords) as Station[])
     .map((station) => ({
       station,
       words: stationWords[station],
-      members: definitions.filter((definition) => definition.station === station),
+      members: calculators.filter((calculator) => calculator.station === station),
     }))
     .filter(({ members }) => members.length > 0)
 

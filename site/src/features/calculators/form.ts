@@ -1,15 +1,6 @@
-import {
-  CalculationError,
-  solve,
-  type CalculatorDefinition,
-  type Cell,
-  type Input,
-  type Inputs,
-  type InputValue,
-  type PlainRow,
-  type PlainValue,
-  type Solution,
-} from '#calc/index.ts'
+import type { CalculatorDefinition, Cell, Input, Inputs, InputValue, PlainRow, PlainValue } from '#calc/index.ts'
+import { CalculationError } from '#calc/errors.ts'
+import { solveDefinition, type Solution } from '#calc/solve-definition.ts'
 import { fieldText } from '#calc/units/format.ts'
 import { parse, type Reading } from '#calc/units/parse.ts'
 import { quantities } from '#calc/units/quantities.ts'
@@ -256,7 +247,7 @@ export const solveForm = (definition: CalculatorDefinition, form: Form): Attempt
   const { inputs, errors } = readForm(definition, form)
   if (Object.keys(errors).length > 0) return { errors }
   try {
-    return { inputs, solution: solve(definition.id, inputs) }
+    return { inputs, solution: solveDefinition(definition, inputs) }
   } catch (error) {
     if (!(error instanceof CalculationError)) throw error
     return { errors: { [pathOfField(error.field)]: error.message } }

@@ -1,4 +1,5 @@
-import { calculator, type PlainRow } from '#calc/index.ts'
+import type { PlainRow } from '#calc/index.ts'
+import { fittings } from '#calc/pipe/fittings.ts'
 import { format, join } from '#calc/units/format.ts'
 import { Framed } from '../../../components/Framed.tsx'
 import { rowsOf, textWidth, type DrawingProps } from './Drawing.tsx'
@@ -6,11 +7,8 @@ import { rowsOf, textWidth, type DrawingProps } from './Drawing.tsx'
 const rowHeight = 50
 const pipe = 12
 
-const kindWords = (kind: string): string => {
-  const rows = calculator('fittings').outputs['rows']
-  const column = rows?.kind === 'rows' ? rows.columns['kind'] : undefined
-  return (column?.kind === 'text' && column.words?.[kind]) || kind
-}
+const words: Readonly<Record<string, string>> = fittings.outputs.rows.columns.kind.words
+const kindWords = (kind: string): string => words[kind] ?? kind
 
 const nameOf = (row: PlainRow): string => {
   const count = Number(row['count'])

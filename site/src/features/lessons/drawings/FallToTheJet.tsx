@@ -1,4 +1,5 @@
 import { useId, useState } from 'react'
+import { power as powerOfWater } from '#calc/water/power.ts'
 import { format, join, say } from '#calc/units/format.ts'
 import { figures } from './figures.ts'
 import { Hatch, MovingDrawing } from './MovingDrawing.tsx'
@@ -20,7 +21,7 @@ export function FallToTheJet() {
   const narrow = useNarrow()
   const hatch = useId()
   const head = wholeFall - over
-  const { hydraulicPower } = figures<'hydraulicPower'>('power', { flow, netHead: head, efficiency: 1 })
+  const { hydraulicPower } = figures(powerOfWater, { flow, netHead: head, efficiency: 1 })
   const power = join(format(hydraulicPower, 'power'))
 
   const width = narrow ? 288 : 640

@@ -1,5 +1,7 @@
 import { useState } from 'react'
-import { calculate, type PlainRow } from '#calc/index.ts'
+import { gaugeReading } from '#calc/pipe/gauge-reading.ts'
+import type { PlainRow } from '#calc/index.ts'
+import { calculateDefinition } from '#calc/solve-definition.ts'
 import { DialGauge } from '../../../components/DialGauge.tsx'
 import { WithSlider } from './MovingDrawing.tsx'
 
@@ -23,9 +25,9 @@ const pressures = (reading: (typeof readings)[number]) => ({
 
 /** What the readings point to: causes and why, without those that only a moving needle shows. */
 const causesFor = (reading: (typeof readings)[number]): string[] => {
-  const { findings } = calculate('gauge-reading', {
+  const { findings } = calculateDefinition(gaugeReading, {
     ...pressures(reading),
-    predictedLoss: calculate('gauge-reading', pressures(first)).headLoss,
+    predictedLoss: calculateDefinition(gaugeReading, pressures(first)).headLoss,
     predictedStatic: first.static * 1e5,
     expectedPower: first.power * 1000,
     measuredPower: reading.power * 1000,

@@ -1,4 +1,5 @@
 import { useId, useState } from 'react'
+import { friction } from '#calc/pipe/friction.ts'
 import { format, join } from '#calc/units/format.ts'
 import { figures } from './figures.ts'
 import { Hatch, MovingDrawing } from './MovingDrawing.tsx'
@@ -18,7 +19,7 @@ export function GradeLineFalls() {
   const [litres, setLitres] = useState(8)
   const narrow = useNarrow()
   const hatch = useId()
-  const { headLoss } = figures<'headLoss'>('friction', { ...pipe, flow: litres / 1000 })
+  const { headLoss } = figures(friction, { ...pipe, flow: litres / 1000 })
   const share = join(format(headLoss / grossHead, 'fraction', { digits: 2 }))
 
   const width = narrow ? 288 : 640

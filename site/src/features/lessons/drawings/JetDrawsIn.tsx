@@ -1,4 +1,5 @@
 import { useState } from 'react'
+import { jet as freeJet } from '#calc/jet/jet.ts'
 import { format, join } from '#calc/units/format.ts'
 import { figures } from './figures.ts'
 import { MovingDrawing } from './MovingDrawing.tsx'
@@ -17,7 +18,7 @@ const mouthWords = (coefficient: number) =>
 export function JetDrawsIn() {
   const [coefficient, setCoefficient] = useState(least)
   const narrow = useNarrow()
-  const { jetDiameter, flow } = figures<'jetDiameter' | 'flow'>('jet', {
+  const { jetDiameter, flow } = figures(freeJet, {
     netHead: 37,
     velocityCoefficient: 0.97,
     contractionCoefficient: coefficient,

@@ -1,4 +1,5 @@
 import { useState } from 'react'
+import { jet } from '#calc/jet/jet.ts'
 import { format, join } from '#calc/units/format.ts'
 import { figures } from './figures.ts'
 import { MovingDrawing } from './MovingDrawing.tsx'
@@ -14,7 +15,7 @@ const middle = 100
 export function JetThinsWithHead() {
   const [netHead, setNetHead] = useState(37)
   const narrow = useNarrow()
-  const { jetVelocity, jetDiameter, jetPower } = figures<'jetVelocity' | 'jetDiameter' | 'jetPower'>('jet', {
+  const { jetVelocity, jetDiameter, jetPower } = figures(jet, {
     ...nozzle,
     netHead,
   })

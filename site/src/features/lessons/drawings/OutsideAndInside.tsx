@@ -1,4 +1,5 @@
 import { useId, useState } from 'react'
+import { friction } from '#calc/pipe/friction.ts'
 import { format, join, say } from '#calc/units/format.ts'
 import { figures } from './figures.ts'
 import { Hatch, MovingDrawing } from './MovingDrawing.tsx'
@@ -16,7 +17,7 @@ export function OutsideAndInside() {
   const narrow = useNarrow()
   const hatch = useId()
   const inside = outside - 2 * wall
-  const { headLoss } = figures<'headLoss'>('friction', { ...run, insideDiameter: inside / 1000 })
+  const { headLoss } = figures(friction, { ...run, insideDiameter: inside / 1000 })
   const loss = join(format(headLoss, 'head'))
 
   const width = narrow ? 288 : 600

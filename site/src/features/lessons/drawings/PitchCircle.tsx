@@ -1,4 +1,5 @@
 import { useState } from 'react'
+import { runner } from '#calc/jet/runner.ts'
 import { format, join } from '#calc/units/format.ts'
 import { figures } from './figures.ts'
 import { MovingDrawing } from './MovingDrawing.tsx'
@@ -12,7 +13,7 @@ const jetWidth = jet.jetDiameter * 1000 * pixelsPerMillimetre
 export function PitchCircle() {
   const [millimetres, setMillimetres] = useState(185)
   const narrow = useNarrow()
-  const { speed, diameterRatio, bucketCount } = figures<'speed' | 'diameterRatio' | 'bucketCount'>('runner', {
+  const { speed, diameterRatio, bucketCount } = figures(runner, {
     ...jet,
     pitchDiameter: millimetres / 1000,
   })

@@ -1,4 +1,5 @@
 import { useState } from 'react'
+import { power } from '#calc/water/power.ts'
 import { format, join } from '#calc/units/format.ts'
 import { figures } from './figures.ts'
 import { MovingDrawing } from './MovingDrawing.tsx'
@@ -25,7 +26,7 @@ export function PowerChain() {
   ]
   const shares = links.map((_, i) => links.slice(0, i + 1).reduce((share, { keeps }) => share * keeps, 1))
   const rows = links.map(({ name, keeps }, i) => {
-    const { outputPower } = figures<'outputPower'>('power', { flow, netHead: grossHead, efficiency: shares[i]! })
+    const { outputPower } = figures(power, { flow, netHead: grossHead, efficiency: shares[i]! })
     return { name, keeps, share: shares[i]!, power: join(format(outputPower, 'power')) }
   })
 

@@ -1,6 +1,8 @@
 import { useState } from 'react'
-import { calculate, type PlainRow } from '#calc/index.ts'
+import type { PlainRow } from '#calc/index.ts'
+import { calculateDefinition } from '#calc/solve-definition.ts'
 import { g } from '#calc/constants.ts'
+import { penstock } from '#calc/pipe/penstock.ts'
 import { format, join } from '#calc/units/format.ts'
 import { waterDensity } from '#calc/water/properties.ts'
 import { DialGauge } from '../../../components/DialGauge.tsx'
@@ -16,7 +18,7 @@ const metres = (value: number) => join(format(value, 'head', { digits: value < 1
 /** A gauge above the valve while the nozzle opens: the reading falls by what the pipe takes and by the head in the water's speed. */
 export function WhatTheGaugeShows() {
   const [litres, setLitres] = useState(7.6)
-  const { headLoss, gradeLine } = calculate('penstock', { grossHead, sections, flow: litres / 1000 })
+  const { headLoss, gradeLine } = calculateDefinition(penstock, { grossHead, sections, flow: litres / 1000 })
   const { energyHead, hydraulicGrade } = (gradeLine as readonly PlainRow[]).at(-1) as Record<string, number>
   const rows = [
     { name: 'the pipe takes', head: headLoss as number },

@@ -14,7 +14,7 @@ const fullScaleFor = (pressure: number): number => {
 }
 
 /** The gauge with both of its readings, on a dial that suits the static one. */
-export function GaugeDrawing({ given }: DrawingProps) {
+export function GaugeReadingDrawing({ given }: DrawingProps) {
   const still = scalar(given, 'staticPressure')!
   const running = scalar(given, 'runningPressure')!
   if (still === 0) return null
