@@ -1,5 +1,5 @@
 import { useId, type ReactNode } from 'react'
-import type { GivenValue } from './example.ts'
+import type { GivenValue } from '../features/calculators/given-values.ts'
 import './example.css'
 
 interface ExampleFrameProps {

@@ -18,11 +18,14 @@ import { searchOf } from './address.ts'
 import './calculators.css'
 import { CopyLink } from './CopyLink.tsx'
 import { changeForm, solveForm, startForm, type Form, type FormAction, type Solved, type Texts } from './form.ts'
+import { givenValues } from './given-values.ts'
 import { InputFields } from './InputFields.tsx'
 import { loadDrawing } from './load-drawing.ts'
 import { placeCautions, summaryOf } from './results.ts'
 import { Figures, Lists } from './Results.tsx'
 import { SourcesAndLimits } from './SourcesAndLimits.tsx'
+import { TakeAway } from './TakeAway.tsx'
+import { textsOf } from './texts-of.ts'
 
 export interface CalculatorProps {
   definition: CalculatorDefinition
@@ -63,6 +66,7 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
     return { form, good: solveForm(definition, form).solution ? form : undefined }
   })
   const [said, setSaid] = useState('')
+  const [example, setExample] = useState<Form>()
   const settling = useRef<number>(undefined)
   const headingId = useId()
 
@@ -87,6 +91,11 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
       onSettle?.(searchOf(definition, next))
     }, settleMilliseconds)
   }
+  const tryExample = () => {
+    const next = startForm(definition, textsOf(definition, definition.example.inputs))
+    setExample(next)
+    put(next)
+  }
   const change = (action: FormAction) => put(changeForm(definition, form, action))
 
   const keys = show?.split(/\s+/).filter((key) => definition.outputs[key]) ?? Object.keys(definition.outputs)
@@ -94,6 +103,8 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
     () => placeCautions(definition, form, solved?.solution.cautions ?? []),
     [definition, form, solved],
   )
+  /** On a page of its own, with what a lesson has no room for. */
+  const isAlone = headingLevel === undefined
   const isStale = !attempt.solution
   const Heading = headingLevel ? (`h${headingLevel}` as const) : undefined
   const Subheading = `h${(headingLevel ?? 1) + 1}` as 'h2' | 'h3' | 'h4' | 'h5'
@@ -121,6 +132,12 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
               <Button type="button" size="3" variant="outline" onClick={() => put(startForm(definition, preset))}>
                 Start again
               </Button>
+              {isAlone && (
+                <Button type="button" size="3" variant="outline" onClick={tryExample}>
+                  Try an example
+                </Button>
+              )}
+              {isAlone && form === example && <p className="copy-note">{definition.example.say}</p>}
             </div>
           </UntilReady>
         </form>
@@ -145,6 +162,16 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
               {drawn && plot?.(drawn)}
               <Subheading className="calculator-subheading">Working</Subheading>
               <Working steps={(drawn ?? solved).solution.working} />
+              {isAlone && attempt.solution && (
+                <TakeAway
+                  report={() => ({
+                    definition,
+                    given: givenValues(definition, form),
+                    solution: attempt.solution,
+                    link: new URL(`/calculators/${id}${searchOf(definition, form)}`, window.location.href).href,
+                  })}
+                />
+              )}
             </div>
           )}
         </div>
