@@ -132,7 +132,7 @@ const checkList = (
  * Checks raw inputs against a definition, once, for everyone: shape, unknown keys, alternatives, missing keys, finiteness and range.
  * Fallbacks are filled in. Throws `CalculationError` naming the field; never changes a value.
  */
-export const checkInputs = (definition: CalculatorDefinition, raw: unknown): Inputs => {
+export const checkInputs = (definition: Pick<CalculatorDefinition, 'title' | 'inputs'>, raw: unknown): Inputs => {
   if (!isRecord(raw))
     throw new CalculationError('missing', Object.keys(definition.inputs)[0]!, 'Give the inputs by name.')
   const { inputs } = definition

@@ -14,7 +14,8 @@ import { calculateDefinition } from './solve-definition.ts'
 /** Standard uncertainties by field: `flow`, `sections[0].length`, `nozzles.diameter`. SI. */
 export type StandardUncertainties = Readonly<Record<string, number>>
 
-interface Field {
+/** A number among the inputs that is not quite known. */
+export interface UncertainField {
   name: string
   key: string
   index?: number
@@ -26,7 +27,12 @@ interface Field {
 
 const pattern = /^([A-Za-z]\w*)(?:\[(\d+)\])?(?:\.([A-Za-z]\w*))?$/
 
-const findField = (definition: CalculatorDefinition, inputs: Inputs, name: string, uncertainty: number): Field => {
+export const uncertainField = (
+  definition: Pick<CalculatorDefinition, 'title' | 'inputs'>,
+  inputs: Inputs,
+  name: string,
+  uncertainty: number,
+): UncertainField => {
   const unknown = () => new CalculationError('unknown-key', name, `${definition.title} has no number called “${name}”.`)
   const [, key = '', index, column] = pattern.exec(name) ?? []
   const input = Object.hasOwn(definition.inputs, key) ? definition.inputs[key]! : undefined
@@ -36,7 +42,7 @@ const findField = (definition: CalculatorDefinition, inputs: Inputs, name: strin
     throw unknown()
   if (!(uncertainty >= 0) || !Number.isFinite(uncertainty))
     throw new CalculationError('not-finite', name, `${cell.label}: give a standard uncertainty that is not negative.`)
-  const field: Omit<Field, 'value'> = {
+  const field: Omit<UncertainField, 'value'> = {
     name,
     key,
     ...(index === undefined ? {} : { index: Number(index) }),
@@ -73,7 +79,7 @@ const cellOf = (input: Input, index: number | undefined, column: string | undefi
 }
 
 /** The number as given, or the fallback where its place is there but left empty. */
-const read = (inputs: Inputs, { key, index, column, cell }: Omit<Field, 'value'>): unknown => {
+const read = (inputs: Inputs, { key, index, column, cell }: Omit<UncertainField, 'value'>): unknown => {
   const value = inputs[key]
   if (index === undefined && column === undefined) return value ?? cell.fallback
   const item = index === undefined ? value : (value as readonly unknown[] | undefined)?.[index]
@@ -81,7 +87,7 @@ const read = (inputs: Inputs, { key, index, column, cell }: Omit<Field, 'value'>
   return item === undefined ? undefined : ((item as PlainRow)[column] ?? cell.fallback)
 }
 
-const replace = (inputs: Inputs, { key, index, column }: Field, value: number): Inputs => {
+export const replaceField = (inputs: Inputs, { key, index, column }: UncertainField, value: number): Inputs => {
   if (column === undefined)
     return {
       ...inputs,
@@ -95,8 +101,12 @@ const replace = (inputs: Inputs, { key, index, column }: Field, value: number): 
   }
 }
 
-const findFields = (definition: CalculatorDefinition, inputs: Inputs, uncertainties: StandardUncertainties): Field[] =>
-  Object.entries(uncertainties).map(([name, uncertainty]) => findField(definition, inputs, name, uncertainty))
+const findFields = (
+  definition: CalculatorDefinition,
+  inputs: Inputs,
+  uncertainties: StandardUncertainties,
+): UncertainField[] =>
+  Object.entries(uncertainties).map(([name, uncertainty]) => uncertainField(definition, inputs, name, uncertainty))
 
 const scalarKeys = (outputs: Outputs): string[] =>
   Object.keys(outputs).filter((key) => typeof outputs[key] === 'number')
@@ -104,20 +114,22 @@ const scalarKeys = (outputs: Outputs): string[] =>
 /** Small against what matters, large against the roots' tolerance. */
 const relativeStep = 1e-4
 
+/** All outputs with another value in one field. */
+type Evaluate = (field: UncertainField, value: number) => Outputs
+
 /** How much each scalar output changes with one field: a central difference, one-sided at the end of a range or of what has a solution. */
 const sensitivities = (
-  definition: CalculatorDefinition,
-  inputs: Inputs,
-  field: Field,
+  field: UncertainField,
   outputs: Outputs,
   keys: readonly string[],
+  evaluate: Evaluate,
 ): Map<string, number> => {
   const [low, high] = field.cell.range
   const step = relativeStep * Math.max(Math.abs(field.value), field.uncertainty)
   const here = { value: field.value, outputs }
   const at = (value: number) => {
     try {
-      return { value, outputs: calculateDefinition(definition, replace(inputs, field, value)) }
+      return { value, outputs: evaluate(field, value) }
     } catch (error) {
       if (error instanceof CalculationError) return here
       throw error
@@ -150,37 +162,47 @@ export interface Uncertain {
 
 /**
  * Combined standard uncertainty of each scalar output by the law of propagation of uncertainty for independent inputs
- * (JCGM 100:2008, 5.1.2), with numerical sensitivities. Throws `CalculationError` for bad inputs or unknown fields.
+ * (JCGM 100:2008, 5.1.2), with numerical sensitivities.
  */
+export const propagate = (
+  fields: readonly UncertainField[],
+  outputs: Outputs,
+  evaluate: Evaluate,
+): Record<string, Uncertain> => {
+  const keys = scalarKeys(outputs)
+  const parts = fields
+    .filter(({ uncertainty }) => uncertainty > 0)
+    .map((field) => ({ field, slopes: sensitivities(field, outputs, keys, evaluate) }))
+  return Object.fromEntries(
+    keys.map((key) => {
+      const variances = parts.map(
+        ({ field, slopes }) => [field.name, ((slopes.get(key) ?? 0) * field.uncertainty) ** 2] as const,
+      )
+      const variance = variances.reduce((sum, [, part]) => sum + part, 0)
+      return [
+        key,
+        {
+          value: outputs[key] as number,
+          standardUncertainty: Math.sqrt(variance),
+          shares: Object.fromEntries(variances.map(([name, part]) => [name, variance === 0 ? 0 : part / variance])),
+        },
+      ]
+    }),
+  )
+}
+
+/** The combined standard uncertainties of one calculator. Throws `CalculationError` for bad inputs or unknown fields. */
 export const uncertaintyOf = (
   definition: CalculatorDefinition,
   inputs: Inputs,
   standardUncertainties: StandardUncertainties,
-): { outputs: Record<string, Uncertain> } => {
-  const outputs = calculateDefinition(definition, inputs)
-  const keys = scalarKeys(outputs)
-  const parts = findFields(definition, inputs, standardUncertainties)
-    .filter((field) => field.uncertainty > 0)
-    .map((field) => ({ field, slopes: sensitivities(definition, inputs, field, outputs, keys) }))
-  return {
-    outputs: Object.fromEntries(
-      keys.map((key) => {
-        const variances = parts.map(
-          ({ field, slopes }) => [field.name, ((slopes.get(key) ?? 0) * field.uncertainty) ** 2] as const,
-        )
-        const variance = variances.reduce((sum, [, part]) => sum + part, 0)
-        return [
-          key,
-          {
-            value: outputs[key] as number,
-            standardUncertainty: Math.sqrt(variance),
-            shares: Object.fromEntries(variances.map(([name, part]) => [name, variance === 0 ? 0 : part / variance])),
-          },
-        ]
-      }),
-    ),
-  }
-}
+): { outputs: Record<string, Uncertain> } => ({
+  outputs: propagate(
+    findFields(definition, inputs, standardUncertainties),
+    calculateDefinition(definition, inputs),
+    (field, value) => calculateDefinition(definition, replaceField(inputs, field, value)),
+  ),
+})
 
 export interface SampledOutput {
   mean: number
@@ -219,7 +241,8 @@ export const monteCarloOf = (
   let redrawn = 0
   for (let trial = 0; trial < trials;) {
     let drawn = inputs
-    for (const field of fields) drawn = replace(drawn, field, field.value + field.uncertainty * normalPair(random)[0])
+    for (const field of fields)
+      drawn = replaceField(drawn, field, field.value + field.uncertainty * normalPair(random)[0])
     let outputs: Outputs
     try {
       outputs = calculateDefinition(definition, drawn)
