@@ -201,6 +201,9 @@ export const lossOf = ({ kind, joint = 'fused' }: Fitting): Exclude<KindOfFittin
   return 'fused' in loss ? loss[joint] : loss
 }
 
+/** Friction factor of a usual pipe, for losses that go with it: common practice, no source. */
+export const usualFrictionFactor = 0.018
+
 /** K of one fitting, whose needed shape is given; f is the pipe's friction factor. */
 export const fittingK = (fitting: Fitting, frictionFactor: number): number => {
   const loss = lossOf(fitting)
