@@ -26,6 +26,7 @@ export type Quantity =
   | 'mass'
   | 'force'
   | 'temperatureDifference'
+  | 'thermalExpansion'
   | 'voltage'
   | 'current'
   | 'resistance'

@@ -5,10 +5,10 @@ const asme = 'ASME B31.9, table 919.3.1, turned from each °F to each K'
 export const expansion = {
   id: 'expansion',
   title: 'Expansion of pipe with temperature',
-  say: 'Coefficient α: a metre of pipe that warms by one kelvin grows by so many metres. Polyethylene moves more than ten times as much as steel, and makers’ figures for it differ widely: the pipe maker’s own rules.',
+  say: 'Coefficient α: how many millimetres a metre of pipe grows when it warms by one kelvin. Polyethylene moves more than ten times as much as steel, and makers’ figures for it differ widely: the pipe maker’s own rules.',
   columns: {
     material: { label: 'Material' },
-    coefficient: { label: 'Coefficient α, 1/K', quantity: 'ratio', digits: 3 },
+    coefficient: { label: 'Coefficient α', quantity: 'thermalExpansion' },
   },
   rows: [
     {

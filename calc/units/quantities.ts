@@ -224,6 +224,15 @@ export const quantities: Readonly<Record<Quantity, QuantityInfo>> = {
     units: [{ name: 'K', factor: 1 }],
     example: '15 K',
   },
+  thermalExpansion: {
+    words: 'an expansion of each metre for each kelvin',
+    si: { name: '1/K', factor: 1 },
+    units: [
+      { name: 'mm/(m·K)', factor: 0.001 },
+      { name: '1/K', factor: 1 },
+    ],
+    example: '0.012 mm/(m·K)',
+  },
   voltage: { words: 'a voltage', si: { name: 'V', mathjs: 'V' }, units: [{ name: 'V', mathjs: 'V' }], example: '48 V' },
   current: { words: 'a current', si: { name: 'A', mathjs: 'A' }, units: [{ name: 'A', mathjs: 'A' }], example: '16 A' },
   resistance: {
