@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest'
-import { checkInputs } from './check.ts'
+import { checkInputs, missingInputs } from './check.ts'
 import { defineCalculator } from './definition.ts'
 import { CalculationError } from './errors.ts'
 import { expectRefusal } from './testing/refusal.ts'
@@ -18,6 +18,26 @@ const definition = defineCalculator({
     note: { kind: 'scalar', label: 'Note', quantity: 'count', range: [0, 9], whole: true, optional: true },
     extra: { kind: 'scalar', label: 'Extra', quantity: 'ratio', range: [0, 1], needs: 'note' },
     shape: { kind: 'choice', label: 'Shape', of: ['round', 'square'], fallback: 'round', optional: true },
+    corner: {
+      kind: 'scalar',
+      label: 'Corner',
+      quantity: 'angle',
+      range: [0, 90],
+      when: { key: 'shape', is: ['square'] },
+    },
+    levels: {
+      kind: 'runs',
+      label: 'Levels',
+      run: 'run',
+      row: 'rise',
+      quantity: 'head',
+      range: [-9, 9],
+      least: 1,
+      most: 2,
+      leastEach: 1,
+      mostEach: 3,
+      optional: true,
+    },
     walls: {
       kind: 'rows',
       label: 'Walls',
@@ -125,7 +145,32 @@ describe('checking', () => {
   test('choices and whole numbers', () => {
     expectRefusal('out-of-range', 'shape', () => check({ ...good, shape: 'oval' }))
     expectRefusal('out-of-range', 'note', () => check({ ...good, note: 1.5 }))
-    expect(check({ ...good, shape: 'square' })).toMatchObject({ shape: 'square' })
+    expect(check({ ...good, shape: 'square', corner: 90 })).toMatchObject({ shape: 'square' })
+  })
+
+  test('what belongs to a choice is wanted with it and refused otherwise, also where the choice is its fallback', () => {
+    expectRefusal('missing', 'corner', () => check({ ...good, shape: 'square' }))
+    expectRefusal('inconsistent', 'corner', () => check({ ...good, shape: 'round', corner: 90 }))
+    expectRefusal('inconsistent', 'corner', () => check({ ...good, corner: 90 }))
+    expect(messageOf({ ...good, corner: 90 })).toBe('Corner belongs to square: leave it out otherwise.')
+  })
+
+  test('runs are lists of lists: what is wrong is told of its run, and the message counts on', () => {
+    expect(check({ ...good, levels: [[1.4, -0.2], [3]] })).toMatchObject({ levels: [[1.4, -0.2], [3]] })
+    expectRefusal('missing', 'levels', () => check({ ...good, levels: [] }))
+    expectRefusal('out-of-range', 'levels', () => check({ ...good, levels: [[1], [2], [3]] }))
+    expectRefusal('missing', 'levels[1]', () => check({ ...good, levels: [[1], []] }))
+    expectRefusal('not-finite', 'levels[0]', () => check({ ...good, levels: [1] }))
+    expectRefusal('not-finite', 'levels[1]', () => check({ ...good, levels: [[1], [2, '3']] }))
+    expectRefusal('out-of-range', 'levels[0]', () => check({ ...good, levels: [[1, 10]] }))
+    expect(messageOf({ ...good, levels: [[1, 10]] })).toMatch(/^Levels, run 1, rise 2 must lie between/)
+  })
+
+  test('tells what is still wanted, of two alternatives the first', () => {
+    expect(missingInputs(definition, {})).toEqual(['depth', 'flow'])
+    expect(missingInputs(definition, { depth: 1, time: 5 })).toEqual(['side'])
+    expect(missingInputs(definition, { ...good, extra: 0.5, shape: 'square' })).toEqual(['note', 'corner'])
+    expect(missingInputs(definition, { depth: 2, time: 5, side: 1 })).toEqual([])
   })
 
   test('says what to write instead, in the units that people use', () => {

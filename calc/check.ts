@@ -80,7 +80,7 @@ const checkColumns = (columns: Columns, label: string, field: string, value: unk
   return row
 }
 
-const checkInput = (input: Input, key: string, value: unknown): InputValue => {
+export const checkInput = (input: Input, key: string, value: unknown): InputValue => {
   switch (input.kind) {
     case 'scalar':
     case 'choice':
@@ -179,4 +179,24 @@ export const checkInputs = (definition: Pick<CalculatorDefinition, 'title' | 'in
       throw new CalculationError('missing', key, `${input.label} is wanted.`)
   }
   return given
+}
+
+/** The inputs that are still wanted before there can be an answer: those by name that are not there, of two alternatives the first named. */
+export const missingInputs = (
+  { inputs }: Pick<CalculatorDefinition, 'inputs'>,
+  given: Readonly<Record<string, unknown>>,
+): string[] => {
+  const isGiven = (key: string) => given[key] !== undefined
+  return Object.entries(inputs).flatMap(([key, input]) => {
+    const { or, goesWith, needs } = input
+    if (!hasPlace(input, inputs, given)) return []
+    if (isGiven(key)) return needs !== undefined && !isGiven(needs) ? [needs] : []
+    if (or !== undefined) {
+      const isFirst = Object.keys(inputs).indexOf(key) < Object.keys(inputs).indexOf(or)
+      return isFirst && !isGiven(or) ? [key] : []
+    }
+    if (goesWith !== undefined) return isGiven(goesWith) ? [key] : []
+    const mayMiss = input.optional ?? needs ?? ('fallback' in input ? input.fallback : undefined)
+    return mayMiss === undefined ? [key] : []
+  })
 }
