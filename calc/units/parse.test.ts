@@ -134,6 +134,8 @@ const spellings: [Quantity, number, string, string[]][] = [
   ['mass', 0.3, 'g', ['300 g', '300 grams']],
   ['force', 3100, 'kN', ['3.1 kN', '3.1 kilonewtons']],
   ['temperatureDifference', 15, 'K', ['15 K', '15 kelvin']],
+  ['thermalExpansion', 1.2e-5, 'mm/(m·K)', ['0.012 mm/(m·K)', '0.012 mm/m/K', '0.012 mm/mK']],
+  ['thermalExpansion', 1.2e-5, '1/K', ['1.2e-5 1/K']],
   ['voltage', 48, 'V', ['48 V', '48 v', '48 volts']],
   ['current', 16, 'A', ['16 A', '16 amps', '16 ampere']],
   ['resistance', 0.4, 'Ω', ['0.4 Ω', '0.4 ohm', '0.4 ohms']],
