@@ -9,7 +9,7 @@ export const manning = {
   columns: {
     kind: { label: 'Kind' },
     channel: { label: 'Channel' },
-    n: { label: 'n, s/m^⅓', quantity: 'ratio' },
+    n: { label: 'n', quantity: 'ratio' },
   },
   rows: [
     { kind: 'lined', channel: 'wood, planed', n: [0.01, 0.012, 0.014], source: chow },

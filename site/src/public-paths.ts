@@ -1,4 +1,5 @@
 import { calculatorIndex } from 'virtual:calculator-index'
+import { tables } from '#calc/tables/tables.ts'
 import { courses, isPublic } from './lib/course-structure.ts'
 
 /** Pages that say the same to everyone, rendered at build. A paid lesson is not among them. */
@@ -12,6 +13,8 @@ export const publicPaths = () => [
     ),
   '/calculators',
   ...calculatorIndex.map(({ id }) => `/calculators/${id}`),
+  '/tables',
+  ...Object.keys(tables).map((id) => `/tables/${id}`),
   '/sign-in',
   '/sign-up',
   '/forgotten-password',

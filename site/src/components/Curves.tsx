@@ -4,6 +4,7 @@ import type { Quantity } from '#calc/index.ts'
 import { fieldText, format, join } from '#calc/units/format.ts'
 import { Framed, isNarrow, type Sheet } from './Framed.tsx'
 import './plot.css'
+import './table-box.css'
 
 export interface Axis {
   label: string

@@ -31,7 +31,7 @@ export const RowsPlot = memo(function RowsPlot({ definition, outputs, rows, x, y
   const up = y.flatMap((name) => {
     const column = output.columns[name]
     if (across?.kind !== 'scalar' || column?.kind !== 'scalar') return []
-    const points = (found).flatMap((row): Point[] => {
+    const points = found.flatMap((row): Point[] => {
       const [along, value] = [row[x], row[name]]
       return typeof along === 'number' && typeof value === 'number' ? [{ x: along, y: value }] : []
     })

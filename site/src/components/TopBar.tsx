@@ -22,6 +22,7 @@ function Places({ signedIn }: { signedIn: boolean }) {
     <>
       <CourseLink />
       <NavLink to="/calculators">Calculators</NavLink>
+      <NavLink to="/tables">Tables</NavLink>
       {signedIn && <NavLink to="/my-learning">My learning</NavLink>}
     </>
   )
@@ -30,7 +31,7 @@ function Places({ signedIn }: { signedIn: boolean }) {
 function AccountLinks({ name }: { name: string | undefined }) {
   const { pathname } = useLocation()
   const signOut = useMutation(useSignOutOptions())
-  const comesBack = /^\/(courses|calculators|my-learning)/.test(pathname) ? pathname : undefined
+  const comesBack = /^\/(courses|calculators|tables|my-learning)/.test(pathname) ? pathname : undefined
   if (name === undefined) {
     return <NavLink to={withReturnPath('/sign-in', comesBack)}>Sign in</NavLink>
   }

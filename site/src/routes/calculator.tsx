@@ -1,4 +1,3 @@
-import { useSyncExternalStore } from 'react'
 import { Link, useLoaderData, useLocation, useNavigate, type LoaderFunctionArgs } from 'react-router-dom'
 import type { CalculatorDefinition } from '#calc/index.ts'
 import { Page } from '../components/Page.tsx'
@@ -9,15 +8,7 @@ import { Calculator } from '../features/calculators/Calculator.tsx'
 import { CalculatorPlots } from '../features/calculators/CalculatorPlots.tsx'
 import { loadDrawing } from '../features/calculators/load-drawing.ts'
 import { loadCalculator } from '../lib/load-calculator.ts'
-
-const never = () => () => undefined
-/** A page rendered at build knows no inputs: those of the address come as soon as the browser has taken it over. */
-const useIsLive = () =>
-  useSyncExternalStore(
-    never,
-    () => true,
-    () => false,
-  )
+import { useIsLive } from '../lib/use-is-live.ts'
 
 /** Put into the history beside an address that the form itself wrote, so that it is not taken for a new one. */
 interface FormState {

@@ -1,6 +1,7 @@
 import type { CSSProperties } from 'react'
 import type { CalculatorDefinition, Caution as CautionOf, Output, Outputs, PlainRow, PlainValue } from '#calc/index.ts'
 import { MathSymbol } from '../../components/Formula.tsx'
+import '../../components/table-box.css'
 import { CautionList } from './CautionList.tsx'
 import { saidOutput, shownOutput, type CellOutput } from './results.ts'
 

@@ -1,23 +1,15 @@
 import { Button } from '@radix-ui/themes'
-import { useState } from 'react'
+import { CopyNote } from '../../components/CopyNote.tsx'
+import { useCopy } from '../../components/use-copy.ts'
 import { saveCsv } from '../../lib/save-csv.ts'
 import { asCells, asText, type Report } from './report.ts'
 
 /** The calculation to take along: as text, as a spreadsheet, on paper. */
 export function TakeAway({ report }: { report: () => Report }) {
-  const [copied, setCopied] = useState<{ text: string; byHand: boolean }>()
-  const copy = async () => {
-    const text = asText(report())
-    try {
-      await navigator.clipboard.writeText(text)
-      setCopied({ text, byHand: false })
-    } catch {
-      setCopied({ text, byHand: true })
-    }
-  }
+  const { copied, copy } = useCopy()
   return (
     <div className="calculator-actions no-print">
-      <Button type="button" size="3" variant="outline" onClick={() => void copy()}>
+      <Button type="button" size="3" variant="outline" onClick={() => void copy(asText(report()))}>
         Copy as text
       </Button>
       <Button
@@ -34,19 +26,13 @@ export function TakeAway({ report }: { report: () => Report }) {
       <Button type="button" size="3" variant="outline" onClick={() => window.print()}>
         Print
       </Button>
-      <p className="copy-note" role="status">
-        {copied && (copied.byHand ? 'Copy this text:' : 'The calculation is copied as text.')}
-      </p>
-      {copied?.byHand && (
-        <textarea
-          className="copy-by-hand"
-          aria-label="The calculation as text"
-          readOnly
-          rows={8}
-          value={copied.text}
-          onFocus={(event) => event.target.select()}
-        />
-      )}
+      <CopyNote
+        copied={copied}
+        done="The calculation is copied as text."
+        byHand="Copy this text:"
+        label="The calculation as text"
+        lines={8}
+      />
     </div>
   )
 }

@@ -6,6 +6,7 @@ import { uncertaintyOf, type Uncertain } from '#calc/uncertainty.ts'
 import { format, join, unitFor } from '#calc/units/format.ts'
 import { fieldWords } from './field-words.ts'
 import type { CellOutput } from './results.ts'
+import '../../components/table-box.css'
 import './uncertainty.css'
 import { useMonteCarlo } from './use-monte-carlo.ts'
 

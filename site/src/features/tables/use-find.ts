@@ -1,0 +1,32 @@
+import { useState } from 'react'
+import { useLocation, useNavigate } from 'react-router-dom'
+import { useIsLive } from '../../lib/use-is-live.ts'
+
+/** Put into the history beside an address that the field itself wrote, so that it is not taken for a new one. */
+interface FindState {
+  find?: string
+}
+
+/** The words looked for, as the address has them (`?find=`); `key` changes when an address comes that the field did not write. */
+export function useFindInAddress() {
+  const location = useLocation()
+  const navigate = useNavigate()
+  const isLive = useIsLive()
+  const written = (location.state as FindState | null)?.find ?? location.key
+  const find = isLive ? (new URLSearchParams(location.search).get('find') ?? '') : ''
+  const write = (text: string) => {
+    const search = text.trim() === '' ? '' : `?${new URLSearchParams({ find: text.trim() })}`
+    void navigate({ search }, { replace: true, preventScrollReset: true, state: { find: written } satisfies FindState })
+  }
+  return { key: isLive ? written : 'built', find, write }
+}
+
+/** The field's text goes ahead of the address, which follows it. */
+export function useFindText({ find, write }: { find: string; write: (text: string) => void }) {
+  const [text, setText] = useState(find)
+  const change = (next: string) => {
+    setText(next)
+    write(next)
+  }
+  return [text, change] as const
+}

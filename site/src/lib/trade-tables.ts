@@ -1,0 +1,139 @@
+import type { Table, TableCell, TableColumn } from '#calc/tables/table.ts'
+import { fieldText, format, formatNumber } from '#calc/units/format.ts'
+import { conversion, quantities } from '#calc/units/quantities.ts'
+
+export type UnitSystem = 'metric' | 'imperial'
+
+/** A table as it is shown: figures in the units chosen, sources numbered. */
+export interface ShownTable {
+  table: Table
+  columns: readonly ShownColumn[]
+  rows: readonly ShownRow[]
+  /** Each source once, in the order in which the rows need them. */
+  sources: readonly string[]
+}
+export interface ShownColumn {
+  /** Its key, and which of three figures where it has three. */
+  id: string
+  label: string
+  /** '' for words and plain numbers. */
+  unit: string
+  isNumber: boolean
+}
+export interface ShownRow {
+  /** Its place in the whole table. */
+  number: number
+  cells: readonly string[]
+  /** Place in `sources`. */
+  source: number
+}
+
+const parts = ['least', 'usual', 'most'] as const
+type Row = Table['rows'][number]
+
+const isThree = (cell: TableCell | undefined): cell is readonly [number, number, number] =>
+  Array.isArray(cell) && cell.length === 3
+
+interface PartOfColumn {
+  key: string
+  column: TableColumn
+  /** Of three figures. */
+  part?: (typeof parts)[number]
+}
+
+/** Three figures are three columns; two stay together as "from … to". */
+const columnsOf = (table: Table): readonly PartOfColumn[] =>
+  Object.entries(table.columns).flatMap(([key, column]): readonly PartOfColumn[] =>
+    table.rows.some((row) => isThree(row[key])) ? parts.map((part) => ({ key, column, part })) : [{ key, column }],
+  )
+
+const imperial = new Map<string, string>([
+  ['mm', 'in'],
+  ['m', 'ft'],
+  ['bar', 'psi'],
+  ['kPa', 'psi'],
+  ['GPa', 'psi'],
+  ['°C', '°F'],
+])
+
+const unitOf = ({ quantity, unit }: TableColumn, system: UnitSystem): string => {
+  if (!quantity) return ''
+  const metric = unit ?? quantities[quantity].units[0]!.name
+  const other = system === 'imperial' ? imperial.get(metric) : undefined
+  return quantities[quantity].units.some(({ name }) => name === other) ? other! : metric
+}
+
+/** Digits of a figure that was turned into other units; in its own it keeps those it was printed with. */
+const turnedDigits = 4
+
+const numberText = (value: number, column: TableColumn, system: UnitSystem): string => {
+  const quantity = column.quantity!
+  const unit = unitOf(column, system)
+  if (column.digits) return format(value, quantity, { digits: column.digits, unit }).text
+  if (unit === unitOf(column, 'metric')) return fieldText(value, quantity, unit)
+  const named = quantities[quantity].units.find(({ name }) => name === unit)!
+  const turned = Number(conversion(quantity, named)!.fromSi(value).toPrecision(turnedDigits))
+  const size = Math.abs(turned)
+  return size !== 0 && (size < 1e-4 || size >= 1e4) ? formatNumber(turned, turnedDigits) : String(turned)
+}
+
+export const absent = '–'
+
+const cellText = (cell: TableCell | undefined, column: TableColumn, system: UnitSystem): string => {
+  if (cell === undefined || cell === '') return absent
+  if (typeof cell === 'string') return cell
+  return [cell]
+    .flat()
+    .map((value) => numberText(value, column, system))
+    .join(' to ')
+}
+
+const cellsOf = (table: Table, row: Row, system: UnitSystem): readonly string[] =>
+  columnsOf(table).map(({ key, column, part }) => {
+    const cell = row[key]
+    return cellText(part && isThree(cell) ? cell[parts.indexOf(part)] : cell, column, system)
+  })
+
+/** Words and numbers apart: "SDR11" is "sdr" and "11". */
+const wordsIn = (text: string): readonly string[] =>
+  text
+    .toLowerCase()
+    .replaceAll('\u00a0', '')
+    .match(/\d+(?:[.,]\d+)?|[\p{L}°Ωµ²³]+/gu) ?? []
+
+const isNumeral = (word: string) => /^\d/.test(word)
+
+/** A word is found by its beginning, a number only whole: 11 is not in 110. */
+const hasWord = (words: readonly string[], wanted: string) => {
+  const word = wanted.replace(',', '.')
+  return words.some((one) => (isNumeral(word) ? one === word : one.startsWith(word)))
+}
+
+/** The rows that have every word looked for, in the table's name, a column's name or a cell. */
+export const showTable = (table: Table, { find = '', system }: { find?: string; system: UnitSystem }): ShownTable => {
+  const wanted = wordsIn(find)
+  const columns = columnsOf(table).map(({ key, column, part }): ShownColumn => ({
+    id: part ? `${key} ${part}` : key,
+    label: part ? `${column.label}, ${part}` : column.label,
+    unit: unitOf(column, system),
+    isNumber: column.quantity !== undefined,
+  }))
+  const common = wordsIn([table.title, ...columns.flatMap(({ label, unit }) => [label, unit])].join(' '))
+  const sources: string[] = []
+  const rows = table.rows.flatMap((row, number): ShownRow[] => {
+    const cells = cellsOf(table, row, system)
+    const words = [...common, ...cells.flatMap(wordsIn)]
+    if (!wanted.every((word) => hasWord(words, word))) return []
+    if (!sources.includes(row.source)) sources.push(row.source)
+    return [{ number, cells, source: sources.indexOf(row.source) }]
+  })
+  return { table, columns, rows, sources }
+}
+
+export const columnWords = ({ label, unit }: ShownColumn): string => (unit ? `${label}, ${unit}` : label)
+
+/** For a spreadsheet, with each row's source in words. */
+export const asCells = ({ columns, rows, sources }: ShownTable): string[][] => [
+  [...columns.map(columnWords), 'Source'],
+  ...rows.map(({ cells, source }) => [...cells.map((cell) => (cell === absent ? '' : cell)), sources[source]!]),
+]
