@@ -6,7 +6,7 @@ const maker = 'another maker’s table (20 at 20 °C, 35 at 10 °C, 50 at 0 °C)
 
 export const bendRadius = {
   id: 'bend-radius',
-  title: 'Least radius of polyethylene pipe bent cold',
+  title: 'Least radius of polyethylene (PE) pipe bent cold',
   say: 'Radius of the centre line, in outside diameters, to which cold pipe may be pulled in the trench. Sources differ, so each is a range: the larger figure is the more careful. Cold pipe wants much more, and no joint may lie in the bend. Ask the pipe’s maker: that answer rules.',
   columns: {
     sdr: { label: 'SDR', quantity: 'count' },

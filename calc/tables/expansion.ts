@@ -12,7 +12,7 @@ export const expansion = {
   },
   rows: [
     {
-      material: 'polyethylene',
+      material: 'polyethylene (PE)',
       coefficient: [1.08e-4, 2.4e-4],
       source: `${asme} (PE 2306 to PE 3406: 108 to 144 × 10⁻⁶); a pipe maker’s table of properties (240 × 10⁻⁶)`,
     },

@@ -12,7 +12,7 @@ export const hazenWilliams = {
     c: { label: 'C', quantity: 'count' },
   },
   rows: [
-    { wall: 'polyethylene', state: 'new', c: 140, source: tabulated },
+    { wall: 'polyethylene (PE)', state: 'new', c: 140, source: tabulated },
     { wall: 'PVC', state: 'new', c: 150, source: tabulated },
     { wall: 'plastic in general', state: 'new', c: [130, 150], source: tabulated },
     { wall: 'glass-fibre pipe', state: 'new', c: 150, source: tabulated },

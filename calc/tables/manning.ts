@@ -5,7 +5,7 @@ const chow = 'V. T. Chow, Open-Channel Hydraulics (1959), table 5-6'
 export const manning = {
   id: 'manning',
   title: 'Manning’s n of channels and streams',
-  say: 'Three figures for each: the least, the usual and the most. Size a leat on the most, with the weed and silt of late summer in it, and check scour with the least. An n worked back from a flow measured in your own leat rules.',
+  say: 'For leats, ditches and streams, three figures each: the least, the usual and the most. Size a leat on the most, with the weed and silt of late summer in it, and check scour with the least. An n worked back from a flow measured in your own leat rules.',
   columns: {
     kind: { label: 'Kind' },
     channel: { label: 'Channel' },

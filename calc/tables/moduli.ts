@@ -7,7 +7,7 @@ const ppi = 'PPI Handbook of PE Pipe, ch. 3, table B.1.1, 23 °C and 50 years'
 export const moduli = {
   id: 'moduli',
   title: 'Stiffness of pipe walls',
-  say: 'Young’s modulus E. The short-term figure belongs to a blow such as surge; the long-term one to a load that stays. Plastics creep, so theirs differ by a factor of five and more, and they are stiffer in cold. A dash means that the metal does not creep at these temperatures. The maker’s figures rule.',
+  say: 'Young’s modulus E, for surge and for collapse. The short-term figure belongs to a blow such as surge; the long-term one to a load that stays. Plastics creep, so theirs differ by a factor of five and more, and they are stiffer in cold. A dash means that the metal does not creep at these temperatures. The maker’s figures rule.',
   columns: {
     material: { label: 'Material' },
     shortTerm: { label: 'Short term', quantity: 'pressure', unit: 'GPa' },

@@ -48,8 +48,8 @@ const rows = ([9, 11, 13.6, 17, 21, 26] as const).flatMap((sdr) =>
 
 export const pePipe = {
   id: 'pe-pipe',
-  title: 'Polyethylene pressure pipe',
-  say: 'Sizes of PE 80 and PE 100 pipe for water. The wall is the least that the standard allows, so the inside diameter (outside diameter less two walls) is the greatest: real pipe is a little narrower. What the maker prints on the pipe and in the data sheet rules.',
+  title: 'Polyethylene (PE) pressure pipe',
+  say: 'Outside diameter, wall and inside diameter of PE 80 and PE 100 pipe for water. The wall is the least that the standard allows, so the inside diameter, the outside less two walls, is the greatest: real pipe is a little narrower. What the maker prints on the pipe and in the data sheet rules.',
   columns: {
     nominal: { label: 'Nominal size dn', quantity: 'count' },
     sdr: { label: 'SDR', quantity: 'count' },

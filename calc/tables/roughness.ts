@@ -16,8 +16,8 @@ export const roughness = {
     roughness: { label: 'Roughness', quantity: 'length', unit: 'mm' },
   },
   rows: [
-    { wall: 'polyethylene, with joints and film', state: 'in service', roughness: [1e-5, 1e-4], source: trade },
-    { wall: 'polyethylene or PVC', state: 'new', roughness: [1.5e-6, 7e-6], source: smooth },
+    { wall: 'polyethylene (PE), with joints and film', state: 'in service', roughness: [1e-5, 1e-4], source: trade },
+    { wall: 'polyethylene (PE) or PVC', state: 'new', roughness: [1.5e-6, 7e-6], source: smooth },
     { wall: 'drawn tube: brass, copper, glass', state: 'new', roughness: 1.5e-6, source: binder },
     { wall: 'commercial steel or wrought iron', state: 'new', roughness: 4.5e-5, source: binder },
     { wall: 'steel penstock, seamless, well fitted', state: 'new', roughness: [1.5e-5, 4e-5], source: idelchik },

@@ -5,7 +5,7 @@ const source =
 
 export const temperatureFactor = {
   id: 'temperature-factor',
-  title: 'Temperature factor of polyethylene pressure pipe',
+  title: 'Temperature factor of polyethylene (PE) pressure pipe',
   say: 'The allowed pressure at 20 °C times this factor is the allowed pressure at the temperature of the pipe wall; between two rows, in proportion. The calculators follow the European and international standard, which is the more careful. AS/NZS practice is shown beside it and is used nowhere here. Black pipe in the sun passes 40 °C. The pipe maker’s own figures rule.',
   columns: {
     temperature: { label: 'Pipe wall', quantity: 'temperature' },

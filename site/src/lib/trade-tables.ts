@@ -23,7 +23,8 @@ export interface ShownColumn {
 export interface ShownRow {
   /** Its place in the whole table. */
   number: number
-  cells: readonly string[]
+  /** Each one's texts: two are from and to, none is nothing known. */
+  cells: readonly (readonly string[])[]
   /** Place in `sources`. */
   source: number
 }
@@ -77,21 +78,15 @@ const numberText = (value: number, column: TableColumn, system: UnitSystem): str
   return size !== 0 && (size < 1e-4 || size >= 1e4) ? formatNumber(turned, turnedDigits) : String(turned)
 }
 
-export const absent = '–'
-
-const cellText = (cell: TableCell | undefined, column: TableColumn, system: UnitSystem): string => {
-  if (cell === undefined || cell === '') return absent
-  if (typeof cell === 'string') return cell
-  return [cell]
-    .flat()
-    .map((value) => numberText(value, column, system))
-    .join(' to ')
+const cellTexts = (cell: TableCell | undefined, column: TableColumn, system: UnitSystem): readonly string[] => {
+  if (cell === undefined || cell === '') return []
+  return typeof cell === 'string' ? [cell] : [cell].flat().map((value) => numberText(value, column, system))
 }
 
-const cellsOf = (table: Table, row: Row, system: UnitSystem): readonly string[] =>
+const cellsOf = (table: Table, row: Row, system: UnitSystem) =>
   columnsOf(table).map(({ key, column, part }) => {
     const cell = row[key]
-    return cellText(part && isThree(cell) ? cell[parts.indexOf(part)] : cell, column, system)
+    return cellTexts(part && isThree(cell) ? cell[parts.indexOf(part)] : cell, column, system)
   })
 
 /** Words and numbers apart: "SDR11" is "sdr" and "11". */
@@ -122,7 +117,7 @@ export const showTable = (table: Table, { find = '', system }: { find?: string; 
   const sources: string[] = []
   const rows = table.rows.flatMap((row, number): ShownRow[] => {
     const cells = cellsOf(table, row, system)
-    const words = [...common, ...cells.flatMap(wordsIn)]
+    const words = [...common, ...cells.flat().flatMap(wordsIn)]
     if (!wanted.every((word) => hasWord(words, word))) return []
     if (!sources.includes(row.source)) sources.push(row.source)
     return [{ number, cells, source: sources.indexOf(row.source) }]
@@ -132,8 +127,19 @@ export const showTable = (table: Table, { find = '', system }: { find?: string; 
 
 export const columnWords = ({ label, unit }: ShownColumn): string => (unit ? `${label}, ${unit}` : label)
 
-/** For a spreadsheet, with each row's source in words. */
-export const asCells = ({ columns, rows, sources }: ShownTable): string[][] => [
-  [...columns.map(columnWords), 'Source'],
-  ...rows.map(({ cells, source }) => [...cells.map((cell) => (cell === absent ? '' : cell)), sources[source]!]),
-]
+export const cellWords = (texts: readonly string[]): string => (texts.length > 0 ? texts.join(' to ') : '–')
+
+/** For a spreadsheet: from and to in columns of their own, each row's source in words. */
+export const asCells = ({ columns, rows, sources }: ShownTable): string[][] => {
+  const isRange = columns.map((_, place) => rows.some(({ cells }) => cells[place]!.length > 1))
+  const heads = columns.flatMap((column, place) =>
+    isRange[place] ? [`${columnWords(column)}, from`, `${columnWords(column)}, to`] : [columnWords(column)],
+  )
+  return [
+    [...heads, 'Source'],
+    ...rows.map(({ cells, source }) => [
+      ...cells.flatMap(([first = '', last = first], place) => (isRange[place] ? [first, last] : [first])),
+      sources[source]!,
+    ]),
+  ]
+}

@@ -19,8 +19,8 @@ export function Component() {
       />
       <h1>Tables</h1>
       <p className="lead">
-        Figures that others published, each with its source. They are where a size starts. The data of the maker of your
-        pipe, valve, gauge or cable rule.
+        Figures that others published, each with its source. They are where a size starts; what the maker of your pipe,
+        valve, gauge or cable says goes before them.
       </p>
       <Rows key={key} {...address} />
     </div>

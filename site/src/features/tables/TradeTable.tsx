@@ -1,4 +1,4 @@
-import { columnWords, type ShownTable } from '../../lib/trade-tables.ts'
+import { cellWords, columnWords, type ShownTable } from '../../lib/trade-tables.ts'
 import '../../components/table-box.css'
 import './trade-table.css'
 
@@ -34,11 +34,11 @@ export function TradeTable({ shown }: { shown: ShownTable }) {
             {rows.map(({ number, cells: [first, ...others], source }) => (
               <tr key={number}>
                 <th scope="row" className={classOf(0)}>
-                  {first}
+                  {cellWords(first!)}
                 </th>
                 {others.map((cell, i) => (
                   <td key={columns[i + 1]!.id} className={classOf(i + 1)}>
-                    {cell}
+                    {cellWords(cell)}
                   </td>
                 ))}
                 {isNumbered && <td className="source-number">{source + 1}</td>}
