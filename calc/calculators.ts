@@ -5,6 +5,7 @@ import { fittings } from './pipe/fittings.ts'
 import { friction } from './pipe/friction.ts'
 import { gaugeReading } from './pipe/gauge-reading.ts'
 import { penstock } from './pipe/penstock.ts'
+import { pressureClass } from './pipe/pressure-class.ts'
 import { flowByBucket } from './site/flow-by-bucket.ts'
 import { headByGauge } from './site/head-by-gauge.ts'
 import { power } from './water/power.ts'
@@ -19,6 +20,7 @@ export const calculators = {
   friction,
   fittings,
   penstock,
+  'pressure-class': pressureClass,
   'gauge-reading': gaugeReading,
   jet,
   runner,
