@@ -1,5 +1,5 @@
 import type { Table, TableCell, TableColumn } from '#calc/tables/table.ts'
-import { fieldText, format, formatNumber } from '#calc/units/format.ts'
+import { fieldText, format, formatNumber, join } from '#calc/units/format.ts'
 import { conversion, quantities } from '#calc/units/quantities.ts'
 
 export type UnitSystem = 'metric' | 'imperial'
@@ -29,7 +29,7 @@ export interface ShownRow {
   source: number
 }
 
-const parts = ['least', 'usual', 'most'] as const
+export const parts = ['least', 'usual', 'most'] as const
 type Row = Table['rows'][number]
 
 const isThree = (cell: TableCell | undefined): cell is readonly [number, number, number] =>
@@ -77,6 +77,10 @@ const numberText = (value: number, column: TableColumn, system: UnitSystem): str
   const size = Math.abs(turned)
   return size !== 0 && (size < 1e-4 || size >= 1e4) ? formatNumber(turned, turnedDigits) : String(turned)
 }
+
+/** A figure with its unit. */
+export const sayFigure = (value: number, column: TableColumn, system: UnitSystem): string =>
+  join({ text: numberText(value, column, system), unit: unitOf(column, system) })
 
 const cellTexts = (cell: TableCell | undefined, column: TableColumn, system: UnitSystem): readonly string[] => {
   if (cell === undefined || cell === '') return []

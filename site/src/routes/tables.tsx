@@ -1,7 +1,7 @@
 import { Link } from 'react-router-dom'
 import { tables } from '#calc/tables/tables.ts'
 import { Page } from '../components/Page.tsx'
-import { FindField } from '../features/tables/FindField.tsx'
+import { FindField } from '../components/FindField.tsx'
 import { TradeTable } from '../features/tables/TradeTable.tsx'
 import { useFindInAddress, useFindText } from '../features/tables/use-find.ts'
 import '../features/tables/table-list.css'

@@ -1,4 +1,4 @@
-import { UntilReady } from '../../components/UntilReady.tsx'
+import { UntilReady } from './UntilReady.tsx'
 import './find-field.css'
 
 interface FindFieldProps {
@@ -18,6 +18,8 @@ export function FindField({ id, label, help, text, onText }: FindFieldProps) {
         className="find-field no-print"
         onSubmit={(event) => {
           event.preventDefault()
+          // Not to a form around a dialog in which the field stands.
+          event.stopPropagation()
           if (document.activeElement instanceof HTMLElement) document.activeElement.blur()
         }}
       >
