@@ -4,6 +4,7 @@ import { runner } from './jet/runner.ts'
 import { fittings } from './pipe/fittings.ts'
 import { friction } from './pipe/friction.ts'
 import { gaugeReading } from './pipe/gauge-reading.ts'
+import { hoopStress } from './pipe/hoop-stress.ts'
 import { penstock } from './pipe/penstock.ts'
 import { pressureClass } from './pipe/pressure-class.ts'
 import { flowByBucket } from './site/flow-by-bucket.ts'
@@ -21,6 +22,7 @@ export const calculators = {
   fittings,
   penstock,
   'pressure-class': pressureClass,
+  'hoop-stress': hoopStress,
   'gauge-reading': gaugeReading,
   jet,
   runner,
