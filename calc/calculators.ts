@@ -7,6 +7,7 @@ import { gaugeReading } from './pipe/gauge-reading.ts'
 import { hoopStress } from './pipe/hoop-stress.ts'
 import { penstock } from './pipe/penstock.ts'
 import { pressureClass } from './pipe/pressure-class.ts'
+import { surge } from './pipe/surge.ts'
 import { flowByBucket } from './site/flow-by-bucket.ts'
 import { headByGauge } from './site/head-by-gauge.ts'
 import { power } from './water/power.ts'
@@ -23,6 +24,7 @@ export const calculators = {
   penstock,
   'pressure-class': pressureClass,
   'hoop-stress': hoopStress,
+  surge,
   'gauge-reading': gaugeReading,
   jet,
   runner,
