@@ -22,9 +22,9 @@ export const gauges = {
     fullScale: { label: 'Full scale', quantity: 'pressure', unit: 'bar' },
     steady: { label: 'Steady, up to', quantity: 'pressure', unit: 'bar' },
     fluctuating: { label: 'Fluctuating, up to', quantity: 'pressure', unit: 'bar' },
-    error1: { label: 'Class 1.0 error ±', quantity: 'pressure', unit: 'bar' },
-    error16: { label: 'Class 1.6 error ±', quantity: 'pressure', unit: 'bar' },
-    error25: { label: 'Class 2.5 error ±', quantity: 'pressure', unit: 'bar' },
+    error1: { label: 'Class 1.0 error', quantity: 'pressure', unit: 'bar' },
+    error16: { label: 'Class 1.6 error', quantity: 'pressure', unit: 'bar' },
+    error25: { label: 'Class 2.5 error', quantity: 'pressure', unit: 'bar' },
   },
   rows: fullScales.map((scale) => ({
     fullScale: scale * bar,

@@ -34,7 +34,14 @@ export function TableDialog({ table: tableId, columns, onChoose, onShut, backTo 
   return (
     <Dialog.Root open onOpenChange={(isOpen) => !isOpen && onShut()}>
       <Dialog.Content className="table-dialog" maxWidth="44rem" onCloseAutoFocus={() => backTo.current?.focus()}>
-        <Dialog.Title>{table.title}</Dialog.Title>
+        <div className="dialog-head">
+          <Dialog.Title mb="0">{table.title}</Dialog.Title>
+          <Dialog.Close>
+            <Button type="button" size="3" variant="outline">
+              Take none
+            </Button>
+          </Dialog.Close>
+        </div>
         <Dialog.Description>{table.say}</Dialog.Description>
         <FindField id={`${id}-find`} label="Find" help="words and sizes" text={find} onText={setFind} />
         {choices.length === 0 && <p role="status">No row has all of “{find.trim()}”. Try fewer words.</p>}
@@ -67,16 +74,9 @@ export function TableDialog({ table: tableId, columns, onChoose, onShut, backTo 
           ))}
         </ul>
         {sources.length === 1 && <p className="choice-source">Source: {sources[0]}</p>}
-        <div className="actions">
-          <Dialog.Close>
-            <Button type="button" size="3" variant="outline">
-              Take none
-            </Button>
-          </Dialog.Close>
-          <Link to={`/tables/${tableId}`} target="_blank" className="table-itself">
-            The whole table, in a new tab
-          </Link>
-        </div>
+        <Link to={`/tables/${tableId}`} target="_blank" className="table-itself">
+          The whole table, in a new tab
+        </Link>
       </Dialog.Content>
     </Dialog.Root>
   )
