@@ -167,7 +167,7 @@ describe('channels and pipes', () => {
   )
 })
 
-describe('fittings', () => {
+describe('coefficients of fittings', () => {
   const k = (fitting: string, shape = '') => fittings.rows.find((r) => r.fitting === fitting && r.shape === shape)?.k
   const copied = 'tables of Munson, Young & Okiishi and others, as copied in lecture notes'
   outside('published', copied, 'threaded 90° elbow 1.5', () => expect(k('90° elbow', 'threaded')).toBe(1.5))
@@ -193,7 +193,7 @@ describe('gauges', () => {
   )
 })
 
-describe('water', () => {
+describe('water by temperature', () => {
   const at20 = water.rows.find((row) => row.temperature === 20)
   const iapws = 'iapws for Python'
   outside('library', iapws, '998.207 kg/m³ at 20 °C', () => expectNear(at20?.density, 998.207, { relative: 5e-6 }))
