@@ -1,6 +1,7 @@
 import type { CalculatorDefinition } from './definition.ts'
 import { jet } from './jet/jet.ts'
 import { runner } from './jet/runner.ts'
+import { collapse } from './pipe/collapse.ts'
 import { fittings } from './pipe/fittings.ts'
 import { friction } from './pipe/friction.ts'
 import { gaugeReading } from './pipe/gauge-reading.ts'
@@ -25,6 +26,7 @@ export const calculators = {
   'pressure-class': pressureClass,
   'hoop-stress': hoopStress,
   surge,
+  collapse,
   'gauge-reading': gaugeReading,
   jet,
   runner,
