@@ -84,7 +84,7 @@ describe('collapse', () => {
   test('goes with the modulus, falls with the SDR and with the ovality', () => {
     fc.assert(
       fc.property(
-        logUniform(5, 200),
+        logUniform(5, 160),
         logUniform(1e7, 3e11),
         uniform(0, 0.2),
         uniform(1.01, 3),
