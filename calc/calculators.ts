@@ -9,6 +9,7 @@ import { hoopStress } from './pipe/hoop-stress.ts'
 import { penstock } from './pipe/penstock.ts'
 import { pressureClass } from './pipe/pressure-class.ts'
 import { surge } from './pipe/surge.ts'
+import { thrust } from './pipe/thrust.ts'
 import { flowByBucket } from './site/flow-by-bucket.ts'
 import { headByGauge } from './site/head-by-gauge.ts'
 import { power } from './water/power.ts'
@@ -27,6 +28,7 @@ export const calculators = {
   'hoop-stress': hoopStress,
   surge,
   collapse,
+  thrust,
   'gauge-reading': gaugeReading,
   jet,
   runner,
