@@ -9,6 +9,7 @@ import { hoopStress } from './pipe/hoop-stress.ts'
 import { penstock } from './pipe/penstock.ts'
 import { pressureClass } from './pipe/pressure-class.ts'
 import { surge } from './pipe/surge.ts'
+import { sweptBend } from './pipe/swept-bend.ts'
 import { thrust } from './pipe/thrust.ts'
 import { flowByBucket } from './site/flow-by-bucket.ts'
 import { headByGauge } from './site/head-by-gauge.ts'
@@ -29,6 +30,7 @@ export const calculators = {
   surge,
   collapse,
   thrust,
+  'swept-bend': sweptBend,
   'gauge-reading': gaugeReading,
   jet,
   runner,
