@@ -18,15 +18,15 @@ export function useFindInAddress() {
     const search = text.trim() === '' ? '' : `?${new URLSearchParams({ find: text.trim() })}`
     void navigate({ search }, { replace: true, preventScrollReset: true, state: { find: written } satisfies FindState })
   }
-  return { key: isLive ? written : 'built', find, write }
+  return { key: written, find, write }
 }
 
-/** The field's text goes ahead of the address, which follows it. */
+/** What is typed goes ahead of the address, which follows it. */
 export function useFindText({ find, write }: { find: string; write: (text: string) => void }) {
-  const [text, setText] = useState(find)
-  const change = (next: string) => {
-    setText(next)
-    write(next)
+  const [typed, setTyped] = useState<string>()
+  const change = (text: string) => {
+    setTyped(text)
+    write(text)
   }
-  return [text, change] as const
+  return [typed ?? find, change] as const
 }
