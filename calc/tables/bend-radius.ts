@@ -1,8 +1,8 @@
 import type { Table } from './table.ts'
 
-const pipa = 'a pipe maker’s table after PIPA POP202, at 20 °C'
+const pipa = 'Vinidex, allowable bending radius of PE pipe at 20 °C, after PIPA POP202'
 const ppi = 'PPI Handbook of PE Pipe, ch. 7, as copied elsewhere'
-const maker = 'another maker’s table (20 at 20 °C, 35 at 10 °C, 50 at 0 °C)'
+const firat = 'Firat, PE pipe, technical information (20 at 20 °C, 35 at 10 °C, 50 at 0 °C)'
 
 export const bendRadius = {
   id: 'bend-radius',
@@ -14,12 +14,12 @@ export const bendRadius = {
     atFreezing: { label: 'At 0 °C, in outside diameters', quantity: 'count' },
   },
   rows: [
-    { sdr: 9, radiusOverOutside: [12, 20], atFreezing: 50, source: `${pipa}; ${maker}` },
-    { sdr: 11, radiusOverOutside: [15, 25], atFreezing: 50, source: `${pipa}; ${ppi}; ${maker}` },
-    { sdr: 13.6, radiusOverOutside: [20, 25], atFreezing: 50, source: `${pipa}; ${ppi}; ${maker}` },
-    { sdr: 17, radiusOverOutside: [20, 27], atFreezing: 50, source: `${pipa}; ${ppi}; ${maker}` },
+    { sdr: 9, radiusOverOutside: [12, 20], atFreezing: 50, source: `${pipa}; ${firat}` },
+    { sdr: 11, radiusOverOutside: [15, 25], atFreezing: 50, source: `${pipa}; ${ppi}; ${firat}` },
+    { sdr: 13.6, radiusOverOutside: [20, 25], atFreezing: 50, source: `${pipa}; ${ppi}; ${firat}` },
+    { sdr: 17, radiusOverOutside: [20, 27], atFreezing: 50, source: `${pipa}; ${ppi}; ${firat}` },
     { sdr: 21, radiusOverOutside: [27, 35], source: `${pipa}; ${ppi}` },
-    { sdr: 26, radiusOverOutside: [30, 45], source: `${pipa}; ${ppi}; another maker’s table (30)` },
+    { sdr: 26, radiusOverOutside: [30, 45], source: `${pipa}; ${ppi}; Firat (30)` },
     { sdr: 33, radiusOverOutside: 65, source: pipa },
   ],
 } as const satisfies Table

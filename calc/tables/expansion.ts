@@ -14,12 +14,12 @@ export const expansion = {
     {
       material: 'polyethylene (PE)',
       coefficient: [1.08e-4, 2.4e-4],
-      source: `${asme} (PE 2306 to PE 3406: 108 to 144 × 10⁻⁶); a pipe maker’s table of properties (240 × 10⁻⁶)`,
+      source: `${asme} (PE 2306 to PE 3406: 108 to 144 × 10⁻⁶); Vinidex, properties of polyethylene (240 × 10⁻⁶)`,
     },
     {
       material: 'PVC-U',
       coefficient: [5.4e-5, 7e-5],
-      source: `${asme} (PVC 1120 and 1220); a pipe maker’s technical manual (70 × 10⁻⁶)`,
+      source: `${asme} (PVC 1120 and 1220); Paling, PVC-U pressure piping, technical manual (70 × 10⁻⁶)`,
     },
     { material: 'carbon steel', coefficient: 1.14e-5, source: asme },
     { material: 'stainless steel, austenitic', coefficient: 1.67e-5, source: asme },

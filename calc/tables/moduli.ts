@@ -18,7 +18,7 @@ export const moduli = {
       material: 'PE 100',
       shortTerm: [0.75e9, 1.25e9],
       longTerm: 0.2e9,
-      source: `short: a pipe maker’s brochure, by ISO 527 at 23 °C; long: ${ppi} (PE4XXX)`,
+      source: `short: Vesbo, PE 100 brochure, by ISO 527; long: ${ppi} (PE4XXX)`,
     },
     {
       material: 'PE 80',

@@ -4,7 +4,8 @@ const binder = 'L. F. Moody, Trans. ASME 66 (1944), as tabulated by R. C. Binder
 const smooth = 'tables after L. F. Moody, Trans. ASME 66 (1944)'
 const idelchik = 'I. E. Idelchik, Handbook of Hydraulic Resistance (2007)'
 const trade = 'common practice, no source'
-const rusted = 'table of absolute roughness at caetool.com'
+const miller =
+  'D. S. Miller, Internal Flow Systems (1990), table 8-1, as summarised in the documentation of the Modelica Standard Library'
 
 export const roughness = {
   id: 'roughness',
@@ -35,8 +36,8 @@ export const roughness = {
       roughness: [6e-4, 5e-3],
       source: idelchik,
     },
-    { wall: 'steel pipe, slightly rusted', state: 'in service', roughness: 4e-4, source: rusted },
-    { wall: 'steel pipe, very rusted', state: 'in service', roughness: 3.35e-3, source: rusted },
+    { wall: 'steel, heavy rust', state: 'in service', roughness: 1e-3, source: miller },
+    { wall: 'steel, lined with mortar, average finish', state: 'new', roughness: 1e-4, source: miller },
     {
       wall: 'penstock with a crust of lime',
       state: 'in service',
@@ -51,6 +52,7 @@ export const roughness = {
     { wall: 'cast iron water pipe', state: 'in service', roughness: 1.4e-3, source: idelchik },
     { wall: 'wood stave', state: 'new', roughness: [2e-4, 9e-4], source: binder },
     { wall: 'reinforced concrete tube', state: 'new', roughness: [2.5e-4, 3.4e-4], source: idelchik },
+    { wall: 'concrete, steel forms, average work', state: 'new', roughness: 1e-4, source: miller },
     { wall: 'concrete', state: 'new', roughness: [3e-4, 3e-3], source: binder },
     { wall: 'riveted steel', state: 'new', roughness: [9e-4, 9e-3], source: binder },
   ],

@@ -142,6 +142,9 @@ describe('roughness', () => {
     ['concrete', [3e-4, 3e-3]],
   ] as const)
     outside('published', binder, wall, () => expect(of(wall)).toEqual(value))
+  outside('published', 'documentation of Modelica.Fluid.Types.Roughness, after Miller (1990)', 'heavy rust, 1 mm', () =>
+    expect(of('steel, heavy rust', 'in service')).toBe(1e-3),
+  )
   const idelchik = 'I. E. Idelchik, Handbook of Hydraulic Resistance (2007), as tabulated in fluids 1.3.1 for Python'
   outside('published', idelchik, 'steel penstock', () =>
     expect(of('steel penstock, seamless, well fitted')).toEqual([1.5e-5, 4e-5]),

@@ -1,7 +1,7 @@
 import type { Table } from './table.ts'
 
 const source =
-  'EN 12201-1 Annex A and ISO 4427; other practice: from the allowed heads of PE 100 PN 16 in a pipe maker’s table to AS/NZS 2033 and 4130'
+  'EN 12201-1 Annex A and ISO 4427; other practice: from the allowed heads of PE 100 PN 16 to AS/NZS 2033 and 4130, Enviropipes, pressure re-rating'
 
 export const temperatureFactor = {
   id: 'temperature-factor',
