@@ -4,6 +4,7 @@ import { runner } from './jet/runner.ts'
 import { collapse } from './pipe/collapse.ts'
 import { fittings } from './pipe/fittings.ts'
 import { friction } from './pipe/friction.ts'
+import { gaugeRange } from './pipe/gauge-range.ts'
 import { gaugeReading } from './pipe/gauge-reading.ts'
 import { hoopStress } from './pipe/hoop-stress.ts'
 import { penstock } from './pipe/penstock.ts'
@@ -31,6 +32,7 @@ export const calculators = {
   collapse,
   thrust,
   'swept-bend': sweptBend,
+  'gauge-range': gaugeRange,
   'gauge-reading': gaugeReading,
   jet,
   runner,

@@ -3,7 +3,7 @@ import type { Table } from './table.ts'
 const bar = 1e5
 
 /** Full scales in bar, in the steps 1, 1.6, 2.5, 4, 6: EN 837-1:1996, recalled and not read. */
-const fullScales = [0.6, 1, 1.6, 2.5, 4, 6, 10, 16, 25, 40, 60, 100] as const
+const fullScales = [0.6, 1, 1.6, 2.5, 4, 6, 10, 16, 25, 40, 60, 100, 160, 250, 400] as const
 
 /** Greatest error, as a share of the span: EN 837-1:1996, table 11. */
 export const accuracyClasses = [0.1, 0.25, 0.6, 1, 1.6, 2.5, 4] as const
