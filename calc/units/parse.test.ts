@@ -202,6 +202,46 @@ describe('figures', () => {
   })
 })
 
+describe('a number that is not quite known', () => {
+  test.each<[string, Quantity, string | undefined, number, number]>([
+    ['31.4 ± 0.2 m', 'head', undefined, 31.4, 0.2],
+    ['31.4 m ± 0.2 m', 'head', undefined, 31.4, 0.2],
+    ['31.4 m ± 0.2', 'head', undefined, 31.4, 0.2],
+    ['31.4 ± 0.2', 'head', 'm', 31.4, 0.2],
+    ['31.4+/-0.2', 'head', 'm', 31.4, 0.2],
+    ['31,4 +- 0,2 m', 'head', undefined, 31.4, 0.2],
+    ['50 m ± 2 %', 'head', undefined, 50, 1],
+    ['50 ± 2 per cent', 'head', 'm', 50, 1],
+    ['1.2 m ± 5 mm', 'length', undefined, 1.2, 0.005],
+    ['-0.4 ± 10 % m', 'head', undefined, -0.4, 0.04],
+    ['10 ± 0.5 °C', 'temperature', undefined, 10, 0.5],
+    ['50 °F ± 0.9 °F', 'temperature', undefined, 10, 0.5],
+    ['55 % ± 2 %', 'fraction', undefined, 0.55, 0.02],
+    ['0.97 ± 0.01', 'ratio', undefined, 0.97, 0.01],
+    ['9.5 L/s ± 0', 'flow', undefined, 0.0095, 0],
+  ])('%s', (text, quantity, unit, value, uncertainty) => {
+    const reading = parse(text, quantity, unit)
+    expect(reading.ok && reading.value).toBeCloseTo(value, 12)
+    expect(reading.ok && reading.uncertainty).toBeCloseTo(uncertainty, 12)
+  })
+
+  test.each([
+    ['31.4 ± m', /After ±/],
+    ['31.4 ± ', /After ±/],
+    ['31.4 m ± 0.2 ± 0.1', /After ±/],
+    ['31.4 m ± -0.2', /never below zero/],
+    ['31.4 m ± 0.2 bar', /measures pressure/],
+    ['± 0.2 m', /Write a head/],
+  ])('%s is refused', (text, message) => {
+    const reading = parse(text, 'head')
+    expect(!reading.ok && reading.message).toMatch(message)
+  })
+
+  test('without one nothing is said of it', () => {
+    expect(parse('31.4 m', 'head')).not.toHaveProperty('uncertainty')
+  })
+})
+
 describe('what is refused, with what to write instead', () => {
   test.each<[string, Quantity, string, RegExp]>([
     ['', 'flow', 'empty', /^Write a flow, for example 9\.5 L\/s\.$/],

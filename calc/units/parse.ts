@@ -2,7 +2,13 @@ import type { Quantity } from '../definition.ts'
 import { conversion, isUnit, quantities, quantityOf, type UnitName } from './quantities.ts'
 
 export type Reading =
-  | { ok: true; value: number; unit: string; figures: number }
+  | {
+      ok: true
+      value: number
+      unit: string
+      figures: number
+      /** One standard uncertainty, SI. */ uncertainty?: number
+    }
   | {
       ok: false
       code: 'empty' | 'no-number' | 'two-ways' | 'no-unit' | 'unknown-unit' | 'wrong-quantity'
@@ -238,11 +244,41 @@ const figuresIn = (plain: string): number => plain.replace('.', '').replace(/^0+
 /** A gallon is a US or an imperial one; the unit library would take the first without asking. */
 const gallons = /\b(gal|gals|gallons?|gpm|gpd)\b/i
 
+const plusMinus = /\s*(?:±|\+\s*\/\s*[-−]|\+[-−])\s*/
+const perCent = /^(.*\d)\s*(?:%|per\s*cent\b|percent\b)\s*(\D*)$/i
+
 /**
  * Reads what a person typed for a quantity: "9,5 l/s", "0.0095 m3/s", "110mm", "1 450 rpm". A number without a unit takes `unit`;
- * without one it is refused, unless the quantity has none. Never throws.
+ * without one it is refused, unless the quantity has none. What follows a ± is one standard uncertainty, in the same unit, in its own, or
+ * in per cent of the number: "31.4 ± 0.2 m", "31.4 m ± 2 %". Never throws.
  */
 export const parse = (text: string, quantity: Quantity, unit?: string): Reading => {
+  const [body = '', spread, ...more] = text.split(plusMinus)
+  if (spread === undefined) return parseOne(text, quantity, unit)
+  const { example } = quantities[quantity]
+  const badSpread = (what: string) => refuse('no-number', `${what} Write it like ${example}, or ${example} ± 2 %.`)
+  if (more.length > 0 || !/\d/.test(spread)) return badSpread('After ± comes one number, the standard uncertainty.')
+  const share = quantities[quantity].units.some(({ name }) => name === '%') ? null : perCent.exec(spread)
+  if (share) {
+    const value = parseOne(body, quantity, share[2] || unit)
+    const part = readNumber(share[1]!, '2')
+    if (!value.ok) return value
+    if ('ok' in part || part.rest !== '' || part.value < 0) return badSpread('The uncertainty cannot be read.')
+    return { ...value, uncertainty: (Math.abs(value.value) * part.value) / 100 }
+  }
+  // "31.4 ± 0.2 m": the one unit is that of both.
+  const behind = parseOne(spread, quantity)
+  const alone = parseOne(body, quantity)
+  const value = alone.ok ? alone : parseOne(body, quantity, behind.ok ? behind.unit : unit)
+  if (!value.ok) return value
+  const part = behind.ok ? behind : parseOne(spread, quantity, value.unit)
+  if (!part.ok) return part
+  const zero = parseOne('0', quantity, part.unit)
+  const uncertainty = part.value - (zero.ok ? zero.value : 0)
+  return uncertainty < 0 ? badSpread('The uncertainty is never below zero.') : { ...value, uncertainty }
+}
+
+const parseOne = (text: string, quantity: Quantity, unit?: string): Reading => {
   const { words, example } = quantities[quantity]
   const trimmed = plainPowers(text.trim())
   if (trimmed === '') return refuse('empty', `Write ${words}, for example ${example}.`)
