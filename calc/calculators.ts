@@ -2,6 +2,7 @@ import type { CalculatorDefinition } from './definition.ts'
 import { jet } from './jet/jet.ts'
 import { runner } from './jet/runner.ts'
 import { collapse } from './pipe/collapse.ts'
+import { fillAndVent } from './pipe/fill-and-vent.ts'
 import { fittings } from './pipe/fittings.ts'
 import { friction } from './pipe/friction.ts'
 import { gaugeRange } from './pipe/gauge-range.ts'
@@ -34,6 +35,7 @@ export const calculators = {
   'swept-bend': sweptBend,
   'gauge-range': gaugeRange,
   'gauge-reading': gaugeReading,
+  'fill-and-vent': fillAndVent,
   jet,
   runner,
 } as const satisfies Record<string, CalculatorDefinition>
