@@ -2,6 +2,7 @@ import { type DynamicModule, type LogLevel, RequestMethod } from '@nestjs/common
 import { NestFactory } from '@nestjs/core'
 import type { NestExpressApplication } from '@nestjs/platform-express'
 import cookieParser from 'cookie-parser'
+import { json } from 'express'
 import helmet from 'helmet'
 import { serveOpenApi } from './open-api.ts'
 import { SITE_FOLDER } from './site-files/lesson-files.controller.ts'
@@ -23,6 +24,8 @@ export async function createApp(
   app.disable('x-powered-by')
   app.use(helmet({ contentSecurityPolicy: { useDefaults: false, directives: contentPolicy }, hsts: false }))
   app.use(cookieParser())
+  // Before the parser of all other routes: a record of flows is long, and so are many calculations at once.
+  app.use('/api/calculators', json({ limit: '4mb' }))
   app.useBodyParser('json', { limit: '256kb' })
   app.use(siteFiles(app.get<string>(SITE_FOLDER)))
   app.setGlobalPrefix('api', { exclude: [{ path: 'lessons/:course/:file', method: RequestMethod.GET }] })

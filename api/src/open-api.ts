@@ -1,6 +1,7 @@
 import type { NestExpressApplication } from '@nestjs/platform-express'
 import { DocumentBuilder, SwaggerModule } from '@nestjs/swagger'
 import { version } from '../../package.json'
+import { calculatorJsonSchemas } from './calculators/calculator-json-schemas.ts'
 import { errorSchema } from './common/dto/error.schema.ts'
 import { antiForgeryHeader } from './common/guards/access.guard.ts'
 
@@ -15,5 +16,12 @@ export function serveOpenApi(app: NestExpressApplication) {
     .setVersion(version)
     .addGlobalResponse({ status: 'default', description: 'A refusal', standardSchema: errorSchema })
     .build()
-  SwaggerModule.setup('api/docs', app, () => SwaggerModule.createDocument(app, settings))
+  SwaggerModule.setup('api/docs', app, () => {
+    const document = SwaggerModule.createDocument(app, settings)
+    const { components } = document
+    return {
+      ...document,
+      components: { ...components, schemas: { ...components?.schemas, ...calculatorJsonSchemas() } },
+    }
+  })
 }

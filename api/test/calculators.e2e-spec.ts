@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { calculators } from '#calc/index.ts'
+import { calculators, solve as solveByLibrary } from '#calc/index.ts'
+import { greatest } from '#api/calculators/calculators.service.ts'
 import { createTestApp, type TestApp } from './create-test-app.ts'
 
 let test: TestApp
@@ -18,6 +19,8 @@ describe('GET /api/calculators', () => {
       expect.objectContaining({
         id: 'jet',
         inputs: expect.objectContaining({ netHead: expect.objectContaining({ kind: 'scalar' }) }),
+        example: calculators.jet.example,
+        plots: calculators.jet.plots,
       }),
     )
   })
@@ -122,5 +125,100 @@ describe('POST /api/calculators/:id/solve', () => {
       expect(Math.abs(body.outputs.headLoss! / loss - 1)).toBeLessThan(1e-6)
       expect(Math.abs(body.outputs.netHead! / (scheme.grossHead - loss) - 1)).toBeLessThan(1e-6)
     }
+  })
+})
+
+describe('POST /api/calculators/solve', () => {
+  const solveAll = (items: unknown) => test.caller().post('/api/calculators/solve').send({ items })
+  const jet = { netHead: 45, velocityCoefficient: 1, jetCount: 1, flow: 0.01 }
+
+  it('answers each item in order as the library does; a bad one does not spoil the others', async () => {
+    const items = [
+      { id: 'jet', inputs: jet },
+      { id: 'jet', inputs: { ...jet, flow: -1 } },
+      { id: 'perpetual-motion', inputs: {} },
+      { id: 'constructor', inputs: {} },
+      { id: 'jet', inputs: JSON.parse('{"__proto__": 1}') as unknown },
+      { id: 'jet', inputs: [] },
+      { id: 'jet' },
+      { id: 'jet', inputs: jet, colour: 1 },
+      { id: 7, inputs: jet },
+      'jet',
+      null,
+      { id: 'water', inputs: {} },
+    ]
+    const { body } = await solveAll(items).expect(200)
+    const trouble = (field: string, code: string) => ({ error: { field, code, message: expect.any(String) } })
+    expect(body).toEqual({
+      results: [
+        JSON.parse(JSON.stringify(solveByLibrary('jet', jet))),
+        trouble('flow', 'out-of-range'),
+        trouble('id', 'not-found'),
+        trouble('id', 'not-found'),
+        trouble('__proto__', 'unknown-key'),
+        trouble('netHead', 'missing'),
+        trouble('inputs', 'invalid-type'),
+        trouble('colour', 'unknown'),
+        trouble('id', 'invalid-type'),
+        trouble('', 'invalid-type'),
+        trouble('', 'invalid-type'),
+        JSON.parse(JSON.stringify(solveByLibrary('water', {}))),
+      ],
+    })
+  })
+
+  it('answers nothing to nothing, and refuses what is no list', async () => {
+    expect((await solveAll([]).expect(200)).body).toEqual({ results: [] })
+    await solveAll({ 0: { id: 'jet', inputs: jet } }).expect(422)
+    await test.caller().post('/api/calculators/solve').send({}).expect(422)
+  })
+
+  it('takes a thousand items, and says so where there are more', async () => {
+    const section = { length: 42, insideDiameter: 0.1102, roughness: 5e-5, totalK: 0.4 }
+    const inputs = { grossHead: 63.123456789, flow: 0.0123456789, sections: Array.from({ length: 10 }, () => section) }
+    const items = (count: number) => Array.from({ length: count }, () => ({ id: 'penstock', inputs }))
+    const { body } = (await solveAll(items(greatest.items)).expect(200)) as { body: { results: unknown[] } }
+    expect(body.results).toHaveLength(greatest.items)
+    const refused = await solveAll(items(greatest.items + 1)).expect(413)
+    expect(refused.body).toMatchObject({ code: 'too-large', message: expect.stringContaining('1000 items') })
+  })
+
+  it('refuses more numbers than it may hold others up for', async () => {
+    const times = (count: number) => ({ id: 'flow-by-bucket', inputs: { volume: 0.02, times: Array(count).fill(5) } })
+    const refused = await solveAll([times(greatest.numbers)]).expect(413)
+    expect(refused.body).toMatchObject({ code: 'too-large', message: expect.stringContaining('numbers') })
+    // So many are read, and refused by the calculator itself.
+    const { body } = await solveAll([times(greatest.numbers - 10)]).expect(200)
+    expect(body).toMatchObject({ results: [{ error: { field: 'times', code: 'out-of-range' } }] })
+  })
+})
+
+describe('the body of a calculation', () => {
+  it('may hold ten years of daily flows to every digit; what is larger is told', async () => {
+    const flows = (count: number) => Array.from({ length: count }, (_, i) => 0.1 + i / 7e5)
+    const read = await solve('flow-by-bucket', { volume: 0.02, times: flows(40_000) }).expect(422)
+    expect(read.body).toMatchObject({ code: 'out-of-range', fields: [{ field: 'times' }] })
+    const refused = await solve('flow-by-bucket', { volume: 0.02, times: flows(400_000) }).expect(413)
+    expect(refused.body).toMatchObject({ code: 'too-large' })
+    // Other routes keep to what they need.
+    const body = { email: 'a'.repeat(300_000), password: 'b' }
+    await test.caller().post('/api/auth/session').send(body).expect(413)
+  })
+})
+
+describe('the contract', () => {
+  interface Contract {
+    components: { schemas: Record<string, unknown> }
+  }
+
+  it('shows what each calculator takes and gives, and names nothing that it does not show', async () => {
+    const { body, text } = (await test.caller().get('/api/docs-json').expect(200)) as { body: Contract; text: string }
+    const shown = Object.keys(body.components.schemas)
+    expect(shown).toEqual(expect.arrayContaining(['FlowByBucketInputs', 'FlowByBucketOutputs']))
+    const named = [...text.matchAll(/"#\/components\/schemas\/(\w+)"/g)].map(([, name]) => name!)
+    expect(named).toContain('FlowByBucketInputs')
+    expect(named).toContain('FlowByBucketOutputs')
+    expect(named.filter((name) => !shown.includes(name))).toEqual([])
+    expect(text).not.toMatch(/"x-/)
   })
 })

@@ -1,12 +1,19 @@
 import { z } from 'zod'
 import { printedStepSchema } from '../../common/dto/printed-step.schema.ts'
 
-/** Inputs as `calc/` checks them: its refusal names the key, which a schema here would only say less well. */
-export const solveRequestSchema = z.object({ inputs: z.record(z.string(), z.unknown()) })
+/** Unknown to this schema: `calc/` checks inputs, and its refusal names the key, which would only be said less well here. */
+const inputs = z.unknown()
+
+export const solveRequestSchema = z.object({ inputs })
 export type SolveRequest = z.infer<typeof solveRequestSchema>
 
-const plainRow = z.record(z.string(), z.union([z.number(), z.string()]))
-const outputs = z.record(z.string(), z.union([z.number(), z.string(), z.array(plainRow)]))
+export const solveItemSchema = z.strictObject({ id: z.string(), inputs })
+/** Each item is checked by itself, so that a bad one does not spoil the others. */
+export const solveBatchSchema = z.object({ items: z.array(z.unknown()) })
+export type SolveBatch = z.infer<typeof solveBatchSchema>
+
+const plainRow = z.record(z.string(), z.union([z.number(), z.string()]).optional())
+const outputs = z.record(z.string(), z.union([z.number(), z.string(), z.array(plainRow)]).optional())
 
 export const solutionSchema = z.object({
   /** SI, under the keys of the calculator's outputs; what cannot be worked out is absent. */
@@ -22,6 +29,14 @@ export const solutionSchema = z.object({
   ),
 })
 
+export const troubleSchema = z.object({ field: z.string(), code: z.string(), message: z.string() })
+export type Trouble = z.infer<typeof troubleSchema>
+
+const plotSchema = z.union([
+  z.object({ say: z.string(), of: z.string(), against: z.string(), from: z.number(), to: z.number() }),
+  z.object({ say: z.string(), rows: z.string(), x: z.string(), y: z.array(z.string()) }),
+])
+
 /** A calculator without its sums: what it takes, what it gives, what it rests on. */
 export const calculatorSchema = z.object({
   id: z.string(),
@@ -33,5 +48,8 @@ export const calculatorSchema = z.object({
   outputs: z.record(z.string(), z.looseObject({ kind: z.string(), label: z.string() })),
   doesNotCheck: z.array(z.string()),
   sources: z.array(z.object({ author: z.string(), title: z.string(), year: z.number(), where: z.string().optional() })),
+  /** Numbers to try, other than those a form starts with; SI. */
+  example: z.object({ say: z.string(), inputs: z.record(z.string(), z.unknown()) }),
+  /** Plots whose shape teaches: an output over an input, or columns of found rows over another. */
+  plots: z.array(plotSchema).optional(),
 })
-export const calculatorsSchema = z.array(calculatorSchema)

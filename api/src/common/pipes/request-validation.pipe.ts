@@ -18,13 +18,19 @@ export class RequestValidationPipe extends StandardSchemaValidationPipe {
     const strict = metadata.type === 'body' && schema instanceof z.ZodObject ? schema.strict() : schema
     return super.transform(value, { ...metadata, schema: strict })
   }
+
+  /**
+   * Nothing is taken out unseen, not even `constructor` or `__proto__`: read as JSON they are keys like others, of which the schemas keep
+   * none, and inputs of a calculator are refused for them by name.
+   */
+  protected override stripProtoKeys() {}
 }
 
 function invalid(issues: readonly z.core.$ZodIssue[]): Refusal {
   return new Refusal('invalid', 'Some of this needs putting right.', issues.flatMap(fieldsOf))
 }
 
-function fieldsOf(issue: z.core.$ZodIssue): ErrorBody['fields'] {
+export function fieldsOf(issue: z.core.$ZodIssue): ErrorBody['fields'] {
   const at = (path: readonly PropertyKey[]) => path.map(String).join('.')
   if (issue.code === 'unrecognized_keys') {
     return issue.keys.map((key) => ({
