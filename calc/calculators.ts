@@ -9,6 +9,7 @@ import { gaugeRange } from './pipe/gauge-range.ts'
 import { gaugeReading } from './pipe/gauge-reading.ts'
 import { hoopStress } from './pipe/hoop-stress.ts'
 import { penstock } from './pipe/penstock.ts'
+import { pipeMovement } from './pipe/pipe-movement.ts'
 import { pressureClass } from './pipe/pressure-class.ts'
 import { surge } from './pipe/surge.ts'
 import { sweptBend } from './pipe/swept-bend.ts'
@@ -36,6 +37,7 @@ export const calculators = {
   'gauge-range': gaugeRange,
   'gauge-reading': gaugeReading,
   'fill-and-vent': fillAndVent,
+  'pipe-movement': pipeMovement,
   jet,
   runner,
 } as const satisfies Record<string, CalculatorDefinition>
