@@ -142,6 +142,17 @@ describe('checking', () => {
     expectRefusal('not-finite', 'timings[0]', () => check({ ...good, timings: [NaN, 1] }))
   })
 
+  test('a list with holes is one with something missing', () => {
+    const holed = (...list: unknown[]) => {
+      delete list[1]
+      return list
+    }
+    expectRefusal('not-finite', 'timings[1]', () => check({ ...good, timings: holed(1, 2, 3) }))
+    expectRefusal('not-finite', 'walls[1]', () => check({ ...good, walls: holed({ height: 1 }, { height: 1 }) }))
+    expectRefusal('not-finite', 'levels[1]', () => check({ ...good, levels: holed([1], [2]) }))
+    expectRefusal('not-finite', 'levels[0]', () => check({ ...good, levels: [holed(1, 2, 3)] }))
+  })
+
   test('choices and whole numbers', () => {
     expectRefusal('out-of-range', 'shape', () => check({ ...good, shape: 'oval' }))
     expectRefusal('out-of-range', 'note', () => check({ ...good, note: 1.5 }))

@@ -125,7 +125,8 @@ const checkList = (
       `${label}: give at least ${least} ${row}${least === 1 ? '' : 's'}.`,
     )
   if (value.length > most) throw new CalculationError('out-of-range', key, `${label}: give at most ${most} ${row}s.`)
-  return value as readonly unknown[]
+  // A copy without holes: whatever goes through a list passes over them, and they would not be checked.
+  return Array.from<unknown>(value)
 }
 
 /**

@@ -4,13 +4,13 @@
  */
 import { type ChildProcess, fork, spawnSync } from 'node:child_process'
 import { cpSync, existsSync, mkdtempSync, rmSync } from 'node:fs'
-import { type AddressInfo, createServer } from 'node:net'
 import { cpus, tmpdir } from 'node:os'
 import path from 'node:path'
 import { isDeepStrictEqual } from 'node:util'
 import { sql } from 'drizzle-orm'
 import { build } from 'vite'
 import { rightAnswer } from '#calc/marking/right-answer.ts'
+import { freePort } from '../scripts/free-port.ts'
 import { builtServer, ended, startServer } from '../scripts/server-process.ts'
 import type { Attempt } from '../src/attempts/dto/attempt.schema.ts'
 import { hashPassword } from '../src/auth/passwords.ts'
@@ -76,14 +76,6 @@ interface Tally {
   milliseconds: number[]
 }
 const emptyTally = (): Tally => ({ count: 0, seconds: 0, milliseconds: [] })
-
-async function freePort(): Promise<number> {
-  const probe = createServer()
-  await new Promise<void>((resolve) => probe.listen(0, '127.0.0.1', resolve))
-  const { port } = probe.address() as AddressInfo
-  await new Promise((resolve) => probe.close(resolve))
-  return port
-}
 
 /** A migrated folder with the learners in it, each with a place in the course. */
 async function prepare(folder: string) {
