@@ -1,4 +1,5 @@
 import type { CalculatorDefinition } from './definition.ts'
+import { alternator } from './electrical/alternator.ts'
 import { jet } from './jet/jet.ts'
 import { runner } from './jet/runner.ts'
 import { collapse } from './pipe/collapse.ts'
@@ -40,6 +41,7 @@ export const calculators = {
   'pipe-movement': pipeMovement,
   jet,
   runner,
+  alternator,
 } as const satisfies Record<string, CalculatorDefinition>
 
 export type CalculatorId = keyof typeof calculators

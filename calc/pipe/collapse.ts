@@ -1,6 +1,6 @@
 import { defineCalculator } from '../definition.ts'
 import { CalculationError } from '../errors.ts'
-import { format, join } from '../units/format.ts'
+import { say } from '../units/format.ts'
 
 /** Air at sea level: ISO 2533. All of it presses on a pipe that holds a full vacuum. */
 const atmosphere = 101_325
@@ -195,7 +195,7 @@ export const collapse = defineCalculator({
                 level: 'stop' as const,
                 about: ['fullVacuumMargin' as const],
                 hazard: 'pressure' as const,
-                say: `A full vacuum passes what this pipe stands with a safety factor of ${join(format(safetyFactor, 'ratio'))}. Take a thicker wall, or make sure of air at the top.`,
+                say: `A full vacuum passes what this pipe stands with a safety factor of ${say(safetyFactor, 'ratio')}. Take a thicker wall, or make sure of air at the top.`,
               },
             ]),
       ...(ovality === 0

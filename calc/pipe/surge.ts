@@ -135,7 +135,7 @@ export const surge = defineCalculator({
     },
     closureParameter: {
       kind: 'scalar',
-      symbol: '\\rho_A',
+      symbol: '\\mathrm{Al}',
       label: 'Closure parameter',
       quantity: 'ratio',
       help: 'full surge over twice the static pressure',
