@@ -61,6 +61,8 @@ export default defineConfig(({ isSsrBuild }) => ({
           },
     },
   },
+  // The worker loads the one calculator that it draws for.
+  worker: { format: 'es', plugins: () => [calculatorIndex(folder('../calc'))] },
   // Bundled, so that the build-time rendering resolves every package as the browser's bundle does.
   ssr: { noExternal: true },
   server: { fs: { allow: [folder('..')] }, proxy: { '/api': server, '/lessons': server } },

@@ -21,6 +21,15 @@ import { flow, insideDiameter } from './inputs.ts'
 const widestMitre = 150
 const tightestSweep = 0.5
 
+/** The kinds that a cell belongs to. */
+const of = (shape: Shape) => ({
+  key: 'kind',
+  is: fittingKinds.filter((kind) => {
+    const { needs, takes = [] } = kindsOfFitting[kind]
+    return needs.includes(shape) || takes.includes(shape)
+  }),
+})
+
 const columns = {
   kind: {
     kind: 'choice',
@@ -39,7 +48,7 @@ const columns = {
     quantity: 'angle',
     help: 'by which the water is turned',
     range: [0, 180],
-    optional: true,
+    when: of('bendAngle'),
   },
   radiusRatio: {
     kind: 'scalar',
@@ -48,7 +57,7 @@ const columns = {
     quantity: 'ratio',
     help: 'of a bend: centre-line radius over inside diameter; of an entrance: rounding radius over inside diameter',
     range: [0, 1000],
-    optional: true,
+    when: of('radiusRatio'),
   },
   diameterRatio: {
     kind: 'scalar',
@@ -56,7 +65,7 @@ const columns = {
     label: 'Smaller over larger bore',
     quantity: 'ratio',
     range: [0, 1],
-    optional: true,
+    when: of('diameterRatio'),
   },
   coneAngle: {
     kind: 'scalar',
@@ -65,28 +74,17 @@ const columns = {
     quantity: 'angle',
     help: 'the whole angle between the two sides',
     range: [1, 180],
-    optional: true,
+    when: of('coneAngle'),
   },
-  joint: { kind: 'choice', label: 'Joint', of: joints, optional: true },
+  joint: { kind: 'choice', label: 'Joint', of: joints, when: of('joint'), optional: true },
 } as const
 
-const shapes = ['bendAngle', 'radiusRatio', 'diameterRatio', 'coneAngle', 'joint'] as const satisfies readonly Shape[]
-
-/** Each kind of fitting is described by its own cells: no more, no less. */
+/** What a kind has not is refused before; what only some kinds must say is asked here. */
 const checkShape = (fitting: Fitting, i: number): void => {
-  const { label, needs, takes = [] } = kindsOfFitting[fitting.kind]
+  const { label, needs } = kindsOfFitting[fitting.kind]
   const field = (shape: Shape) => `fittings[${i}].${shape}`
-  for (const shape of shapes) {
-    const given = fitting[shape] !== undefined
-    if (!given && needs.includes(shape))
-      throw new CalculationError('missing', field(shape), `${columns[shape].label} is wanted for a ${label}.`)
-    if (given && !needs.includes(shape) && !takes.includes(shape))
-      throw new CalculationError(
-        'inconsistent',
-        field(shape),
-        `A ${label} has no ${columns[shape].label.toLowerCase()}: leave that empty.`,
-      )
-  }
+  if (needs.includes('joint') && fitting.joint === undefined)
+    throw new CalculationError('missing', field('joint'), `${columns.joint.label} is wanted for a ${label}.`)
   if (fitting.kind === 'mitre-bend' && fitting.bendAngle! > widestMitre)
     throw new CalculationError(
       'out-of-range',

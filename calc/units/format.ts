@@ -1,5 +1,6 @@
 import type { Quantity } from '../definition.ts'
 import { conversion, quantities, type UnitName } from './quantities.ts'
+import { shownUnit } from './system.ts'
 
 const superscripts: Record<string, string> = {
   '-': '⁻',
@@ -34,18 +35,21 @@ export const formatNumber = (value: number, digits: number): string => {
   return `${rounded < 0 ? '−' : ''}${group(whole!)}${fraction ? `.${fraction}` : ''}`
 }
 
-/** The unit in which a value of this quantity reads best, or the one that is asked for by name. */
-export const unitFor = (quantity: Quantity, value: number, name?: string): UnitName => {
+const unitNamed = (quantity: Quantity, name: string): UnitName => {
   const { units, si } = quantities[quantity]
-  if (name !== undefined) {
-    const named = [...units, si].find((unit) => unit.name === name)
-    if (!named) throw new RangeError(`no unit "${name}" for ${quantity}`)
-    return named
-  }
-  return units.reduce(
-    (best, unit) => (unit.from !== undefined && Math.abs(value) >= unit.from ? unit : best),
-    units[0]!,
-  )
+  const named = [...units, si].find((unit) => unit.name === name)
+  if (!named) throw new RangeError(`no unit "${name}" for ${quantity}`)
+  return named
+}
+
+/** The unit in which a value of this quantity reads best, or the one that is asked for by name; in the system that is shown. */
+export const unitFor = (quantity: Quantity, value: number, name?: string): UnitName => {
+  const { units } = quantities[quantity]
+  const best =
+    name ??
+    units.reduce((best, unit) => (unit.from !== undefined && Math.abs(value) >= unit.from ? unit : best), units[0]!)
+      .name
+  return unitNamed(quantity, shownUnit(quantity, best))
 }
 
 export interface Shown {
@@ -79,11 +83,7 @@ export const say = (value: number, quantity: Quantity, unit?: string): string =>
 
 /** An SI value as a field starts with it, in the unit named; every digit that matters and no more. */
 export const fieldText = (value: number, quantity: Quantity, unit: string): string => {
-  const number = Number(
-    conversion(quantity, unitFor(quantity, value, unit))!
-      .fromSi(value)
-      .toPrecision(12),
-  )
+  const number = Number(conversion(quantity, unitNamed(quantity, unit))!.fromSi(value).toPrecision(12))
   const size = Math.abs(number)
   return size !== 0 && (size < 1e-6 || size >= 1e15) ? number.toExponential() : String(number)
 }

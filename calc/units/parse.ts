@@ -70,6 +70,10 @@ const otherSpellings = new Map<string, string>(
     kwhr: 'kWh',
     kwhrs: 'kWh',
     'm/100m': 'm per 100 m',
+    usgpm: 'US gal/min',
+    'usgal/min': 'US gal/min',
+    usgal: 'US gal',
+    usgals: 'US gal',
     kilo: 'kg',
     kilos: 'kg',
     kelvin: 'K',
@@ -243,6 +247,8 @@ const figuresIn = (plain: string): number => plain.replace('.', '').replace(/^0+
 
 /** A gallon is a US or an imperial one; the unit library would take the first without asking. */
 const gallons = /\b(gal|gals|gallons?|gpm|gpd)\b/i
+/** Said with their country they are clear. */
+const usGallons = /^US\s?(gal|gpm)/i
 
 const plusMinus = /\s*(?:±|\+\s*\/\s*[-−]|\+[-−])\s*/
 const perCent = /^(.*\d)\s*(?:%|per\s*cent\b|percent\b)\s*(\D*)$/i
@@ -290,12 +296,13 @@ const parseOne = (text: string, quantity: Quantity, unit?: string): Reading => {
   const rest = number.rest.replace(/[.,;]?\s*$/, '').trim()
   const written = rest === '' ? unit : rest
   const chosen = written === undefined ? unitless(quantity) : findUnit(written, quantity)
-  if (chosen && !gallons.test(chosen.name)) {
+  const isUnclear = written !== undefined && gallons.test(written) && !usGallons.test(written)
+  if (chosen && !isUnclear) {
     const value = conversion(quantity, chosen)!.toSi(number.value)
     return { ok: true, value, unit: chosen.name, figures: number.figures }
   }
   if (written === undefined) return refuse('no-unit', `Say the unit too, for example ${example}.`)
-  if (gallons.test(written))
+  if (isUnclear)
     return refuse(
       'unknown-unit',
       `A gallon is 3.785 L in one country and 4.546 L in another: write ${words} like ${example}.`,

@@ -65,7 +65,7 @@ function FieldFrame({ id, label, symbol, help, error, after, children }: FieldFr
 }
 
 /** A dimensionless number's unit has no name of its own: a share is said as a per cent or as a part of one. */
-const unitWords = (unit: string) => (unit === '' ? 'of 1' : unit)
+export const unitWords = (unit: string) => (unit === '' ? 'of 1' : unit)
 
 /** A number with its unit, kept as it is written. The unit can be chosen, or written behind the number. */
 export function QuantityField({ text, unit, units, negative, onText, onUnit, ...frame }: QuantityFieldProps) {

@@ -1,6 +1,6 @@
 import type { CalculatorDefinition, Cell } from '#calc/index.ts'
 import { parse } from '#calc/units/parse.ts'
-import { columnsOfRow, isMany, pathOf } from './columns.ts'
+import { columnsOfRow, isMany, isRecord, pathOf } from './columns.ts'
 import { shownKeys, startForm, type FieldText, type Form, type Texts } from './form.ts'
 
 /** The inputs of a calculator in an address: `?flow=9.5+L/s&sections.0.length=120+m`. Text goes out and comes back as it was written. */
@@ -10,7 +10,9 @@ const withUnit = (cell: Cell, { text, unit }: FieldText): string => {
   if (cell.kind === 'choice' || unit === '' || text.trim() === '') return text
   const alone = parse(text, cell.quantity, unit)
   const together = parse(`${text} ${unit}`, cell.quantity, unit)
-  return alone.ok && together.ok && together.value === alone.value ? `${text.trim()} ${unit}` : text
+  return alone.ok && together.ok && together.value === alone.value && together.uncertainty === alone.uncertainty
+    ? `${text.trim()} ${unit}`
+    : text
 }
 
 export const textsOf = (definition: CalculatorDefinition, form: Form): Record<string, string> => {
@@ -23,6 +25,8 @@ export const textsOf = (definition: CalculatorDefinition, form: Form): Record<st
   }
   for (const key of shownKeys(definition, form)) {
     const input = definition.inputs[key]!
+    // A record of years is too long for an address.
+    if (isRecord(input)) continue
     if (!isMany(input)) {
       write(input, key, form.fields[key]!, start.fields[key]!.text === '')
       continue
@@ -30,7 +34,7 @@ export const textsOf = (definition: CalculatorDefinition, form: Form): Record<st
     const rows = form.rows[key]!
     if (rows.length === 0 && start.rows[key]!.length > 0) texts[key] = ''
     rows.forEach((row, i) => {
-      for (const [name, cell] of Object.entries(columnsOfRow(definition, input, row))) {
+      for (const [name, cell] of Object.entries(columnsOfRow(input, row))) {
         const starting = input.kind === 'group' ? start.rows[key]![0]![name]!.text : cell.initial
         write(cell, pathOf(input, key, i, name), row[name]!, starting === undefined || starting === '')
       }

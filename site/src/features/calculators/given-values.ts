@@ -1,5 +1,5 @@
 import type { CalculatorDefinition, Cell } from '#calc/index.ts'
-import { columnsOfRow, isMany, pathOf } from './columns.ts'
+import { columnsOfRow, isMany, isRecord, pathOf } from './columns.ts'
 import { shownKeys, type FieldText, type Form } from './form.ts'
 
 export interface GivenValue {
@@ -24,11 +24,15 @@ export function givenValues(
   }
   return shownKeys(definition, form).flatMap((key) => {
     const input = definition.inputs[key]!
+    if (isRecord(input)) {
+      const { values, from } = form.records[key]!
+      return [{ label: input.label, text: `${values.length} ${input.row}s (${from})` }]
+    }
     if (!isMany(input)) return value(input.label, input, key, form.fields[key]!)
     return form.rows[key]!.flatMap((row, i) =>
-      Object.entries(columnsOfRow(definition, input, row)).flatMap(([name, cell]) => {
+      Object.entries(columnsOfRow(input, row)).flatMap(([name, cell]) => {
         const of = input.kind === 'rows' ? `${input.row} ${i + 1}: ` : ''
-        const label = input.kind === 'series' ? `${cell.label} ${i + 1}` : of + cell.label
+        const label = input.kind === 'series' || input.kind === 'runs' ? `${cell.label} ${i + 1}` : of + cell.label
         return value(label.charAt(0).toUpperCase() + label.slice(1), cell, pathOf(input, key, i, name), row[name]!)
       }),
     )

@@ -1,0 +1,227 @@
+import { Button } from '@radix-ui/themes'
+import { useId, useState, type DragEvent, type ReactNode } from 'react'
+import type { RecordInput } from './columns.ts'
+import type { DailyRecord, DateOrder, FlowUnit, RecordOptions, RecordProblem, RecordReading } from './daily-record.ts'
+import type { FlowRecord, FormAction } from './form.ts'
+import './record-field.css'
+import { SparkLine } from './SparkLine.tsx'
+
+interface RecordFieldProps {
+  idOf: (path: string) => string
+  path: string
+  input: RecordInput
+  record: FlowRecord
+  error: string | undefined
+  change: (action: FormAction) => void
+  after: ReactNode
+}
+
+interface Source {
+  name: string
+  text: string
+  options: RecordOptions
+  reading: RecordReading
+}
+
+/** The list of cells stays short enough to be read. */
+const mostShown = 20
+
+function Problems({ problems }: { problems: readonly RecordProblem[] }) {
+  if (problems.length === 0) return null
+  return (
+    <ul className="record-problems">
+      {problems.slice(0, mostShown).map(({ row, column, cell, say }) => (
+        <li key={`${row} ${column}`}>
+          Row {row}, column {column}
+          {cell.trim() !== '' && <>, “{cell.slice(0, 40)}”</>}: {say}
+        </li>
+      ))}
+      {problems.length > mostShown && <li>And {problems.length - mostShown} more.</li>}
+    </ul>
+  )
+}
+
+/** Years of daily flows: from a file that is chosen or dropped, or pasted. It is read here and goes nowhere. */
+export function RecordField({ idOf, path, input, record, error, change, after }: RecordFieldProps) {
+  const id = useId()
+  const [source, setSource] = useState<Source>()
+  const [over, setOver] = useState(false)
+  const [failed, setFailed] = useState<string>()
+
+  const read = async (name: string, text: string, options: RecordOptions = {}) => {
+    setFailed(undefined)
+    try {
+      const { readDailyRecord } = await import('./daily-record.ts')
+      const reading = readDailyRecord(text, options)
+      setSource({ name, text, options, reading })
+      if ('record' in reading) {
+        const values = reading.record.days.map(({ flow }) => flow)
+        if (values.length > input.most) setFailed(`There are more than ${input.most} days: take a part of the record.`)
+        else change({ do: 'take-record', key: path, record: { values, from: name } })
+      }
+    } catch {
+      setFailed('The file could not be read here. Try again, or paste its text.')
+    }
+  }
+  const take = async (file: File | undefined) => {
+    if (!file) return
+    // Ten years of days are a fifth of a megabyte; what is a hundred times that is no such record.
+    if (file.size > 2e7)
+      setFailed('This file is too large for a record of daily flows: choose a text file of dates and flows.')
+    else await read(file.name, await file.text())
+  }
+  const drop = (event: DragEvent) => {
+    event.preventDefault()
+    setOver(false)
+    const [file] = event.dataTransfer.files
+    if (file) void take(file)
+    else void read('Dropped text', event.dataTransfer.getData('text'))
+  }
+  const again = (options: RecordOptions) => {
+    if (source) void read(source.name, source.text, { ...source.options, ...options })
+  }
+  const reading = source?.reading
+
+  return (
+    <fieldset className="field-list record-field" id={idOf(path)}>
+      <legend>{input.label}</legend>
+      <p className="field-help">{input.help ? `${input.help}; nothing` : 'Nothing'} leaves this browser.</p>
+      <div
+        className={over ? 'drop-place drop-place-over' : 'drop-place'}
+        onDragOver={(event) => {
+          event.preventDefault()
+          setOver(true)
+        }}
+        onDragLeave={() => setOver(false)}
+        onDrop={drop}
+      >
+        <p className="record-name">
+          <strong>{record.from}</strong>: {record.values.length} {input.row}s
+        </p>
+        <SparkLine values={record.values} />
+        <label className="file-choice no-print">
+          Choose a file, or drop it here
+          <input
+            type="file"
+            accept=".csv,.txt,.tsv,.tab,.dat,text/csv,text/plain"
+            onChange={(event) => {
+              void take(event.target.files?.[0])
+              // The same file, mended, may be chosen again.
+              event.target.value = ''
+            }}
+          />
+        </label>
+        <details className="no-print">
+          <summary>Paste it instead</summary>
+          <label htmlFor={`${id}paste`} className="field-help">
+            A date and a flow in each row
+          </label>
+          <textarea
+            id={`${id}paste`}
+            rows={4}
+            spellCheck={false}
+            placeholder={'2025-01-01; 12.4\n2025-01-02; 11.9'}
+            onPaste={(event) => {
+              const text = event.clipboardData.getData('text')
+              if (text.trim() !== '') void read('Pasted record', text)
+            }}
+            onBlur={(event) => {
+              const text = event.target.value
+              if (text.trim() !== '' && text !== source?.text) void read('Written record', text)
+            }}
+          />
+        </details>
+      </div>
+      <div role="status">
+        {reading && 'refused' in reading && (
+          <>
+            <p className="field-error">{reading.refused} The record before stands.</p>
+            <Problems problems={reading.problems} />
+          </>
+        )}
+        {reading && 'record' in reading && <Understood record={reading.record} again={again} />}
+        {failed && <p className="field-error">{failed}</p>}
+        {error && <p className="field-error">{error}</p>}
+      </div>
+      {source && input.initial && (
+        <Button
+          type="button"
+          variant="outline"
+          size="3"
+          className="no-print"
+          onClick={() => {
+            setSource(undefined)
+            change({ do: 'take-record', key: path, record: { values: input.initial!, from: 'An invented record' } })
+          }}
+        >
+          Back to the invented record
+        </Button>
+      )}
+      {after}
+    </fieldset>
+  )
+}
+
+const units: readonly FlowUnit[] = ['L/s', 'm³/s', 'ft³/s']
+const orders: readonly { value: DateOrder; words: string }[] = [
+  { value: 'day-first', words: 'day, then month' },
+  { value: 'month-first', words: 'month, then day' },
+]
+
+/** What was understood of a record, and what only its owner knows. */
+function Understood({ record, again }: { record: DailyRecord; again: (options: RecordOptions) => void }) {
+  return (
+    <>
+      <ul className="record-notes">
+        {record.notes.map((note) => (
+          <li key={note}>{note}</li>
+        ))}
+      </ul>
+      <div className="record-choices no-print">
+        <label>
+          Flows are in{' '}
+          <select value={record.unit} onChange={(event) => again({ unit: event.target.value as FlowUnit })}>
+            {units.map((unit) => (
+              <option key={unit}>{unit}</option>
+            ))}
+          </select>
+          {record.isUnitGuessed && <span className="field-help"> the file does not say</span>}
+        </label>
+        {record.dateOrder && (
+          <label>
+            Dates are{' '}
+            <select
+              value={record.dateOrder}
+              onChange={(event) => again({ dateOrder: event.target.value as DateOrder })}
+            >
+              {orders.map(({ value, words }) => (
+                <option key={value} value={value}>
+                  {words}
+                </option>
+              ))}
+            </select>
+            {record.isOrderGuessed && <span className="field-help"> both would do</span>}
+          </label>
+        )}
+        {record.flowColumns.length > 1 && (
+          <label>
+            The flow is in{' '}
+            <select value={record.flowColumn} onChange={(event) => again({ flowColumn: Number(event.target.value) })}>
+              {record.flowColumns.map(({ column, name }) => (
+                <option key={column} value={column}>
+                  {name}
+                </option>
+              ))}
+            </select>
+          </label>
+        )}
+      </div>
+      {record.leftOut.length > 0 && (
+        <details>
+          <summary>{record.leftOut.length} cells hold no flow: those days are gaps</summary>
+          <Problems problems={record.leftOut} />
+        </details>
+      )}
+    </>
+  )
+}
