@@ -217,7 +217,7 @@ export const alternator = defineCalculator({
     const limit = join(format(controllerMaximum, 'voltage'))
     return [
       {
-        level: 'stop',
+        level: 'check',
         about: ['directVoltageOpen'],
         hazard: 'electricity',
         say: 'These volts can kill, and they are there as long as the runner turns: stop the water, wait until it stands, and measure before you touch. Leave mains wiring and grid connection to licensed people; local code rules earthing and protection.',

@@ -75,7 +75,8 @@ describe('fill-and-vent', () => {
   test('a deeper vacuum never draws less, a wider vent draws with its area', () => {
     fc.assert(
       fc.property(uniform(10, 1e5), uniform(0, 900), uniform(1, 3), (allowedVacuum, more, times) => {
-        expect(airAt(allowedVacuum + more)).toBeGreaterThanOrEqual(airAt(allowedVacuum))
+        // Up to the last bit.
+        expect(airAt(allowedVacuum + more)).toBeGreaterThanOrEqual(airAt(allowedVacuum) * (1 - 1e-12))
         const wide = vent({ allowedVacuum, ventDiameter: 0.025 * times })
         expectNear(wide.ventAirFlow, airAt(allowedVacuum) * times ** 2, { relative: 1e-9 })
       }),

@@ -285,7 +285,7 @@ export const sweptBend = defineCalculator({
           ]),
     ]
   },
-  cautions: ({ outsideDiameter, wallThickness, bendAngle, flow }) => [
+  cautions: ({ outsideDiameter, wallThickness, bendAngle, flow }, { saving }) => [
     {
       level: 'stop',
       about: ['fillVolume'],
@@ -315,6 +315,15 @@ export const sweptBend = defineCalculator({
       about: ['bendRadiusOverOutside'],
       say: `Pulled cold, pipe wants a far larger radius than formed hot. ${leastRadiusWords(outsideDiameter / wallThickness)} Cold weather wants more, no joint may lie in the bend, and a pipe that is held bent whips when let go.`,
     },
+    ...(saving !== undefined && saving < 0
+      ? [
+          {
+            level: 'note' as const,
+            about: ['saving' as const],
+            say: 'The sweep’s loss has the friction of its own long arc in it. An elbow has two straight legs instead, which rub as well and are not counted here.',
+          },
+        ]
+      : []),
     ...(flow !== undefined && (bendAngle < elbows[0] || bendAngle > elbows[1])
       ? [
           {
