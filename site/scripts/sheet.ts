@@ -12,9 +12,6 @@ import { chromium, type Browser, type Page } from '@playwright/test'
 import { build, preview } from 'vite'
 import { calculator, calculators, type CalculatorDefinition } from '#calc/index.ts'
 import { chromiumFlags, chromiumPath, ensureChromium } from '../../.config/scripts/chromium.ts'
-import { searchOf } from '../src/features/calculators/address.ts'
-import { startForm } from '../src/features/calculators/form.ts'
-import { textsOf } from '../src/features/calculators/texts-of.ts'
 
 const { values, positionals } = parseArgs({ options: { only: { type: 'string' } }, allowPositionals: true })
 const folder = path.resolve(positionals[0] ?? path.join(tmpdir(), 'leatwright-sheet'))
@@ -23,11 +20,6 @@ const definitions = values.only?.split(',').map(calculator) ?? Object.values<Cal
 const widths = [1280, 320] as const
 const schemes = ['light', 'dark'] as const
 const fileOf = (id: string, width: number, scheme: string) => `${id}-${width}-${scheme}.png`
-
-const addressOf = (definition: CalculatorDefinition) => {
-  const form = startForm(definition, textsOf(definition, definition.example.inputs))
-  return `/calculators/${definition.id}${searchOf(definition, form)}`
-}
 
 const findings: string[] = []
 
@@ -39,7 +31,9 @@ async function takePictures(page: Page, origin: string, width: number, definitio
   }
   page.on('pageerror', listeners.pageerror).on('console', listeners.console)
   await page.emulateMedia({ colorScheme: 'light', reducedMotion: 'reduce' })
-  await page.goto(origin + addressOf(definition), { waitUntil: 'networkidle' })
+  await page.goto(`${origin}/calculators/${definition.id}`, { waitUntil: 'networkidle' })
+  await page.getByRole('button', { name: 'Try an example' }).click()
+  await page.waitForURL(/\?/)
   await page.evaluate(() => document.fonts.ready)
   for (const scheme of schemes) {
     await page.emulateMedia({ colorScheme: scheme, reducedMotion: 'reduce' })

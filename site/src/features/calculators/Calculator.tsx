@@ -1,6 +1,7 @@
 import { Button } from '@radix-ui/themes'
 import {
   createElement,
+  Fragment,
   memo,
   use,
   useDeferredValue,
@@ -12,8 +13,11 @@ import {
   type ReactNode,
 } from 'react'
 import type { CalculatorDefinition } from '#calc/index.ts'
+import { showUnitsOf, type UnitSystem } from '#calc/units/system.ts'
+import { UnitChoice } from '../../components/UnitChoice.tsx'
 import { UntilReady } from '../../components/UntilReady.tsx'
 import { Working } from '../../components/Working.tsx'
+import { useUnits } from '../../lib/unit-preference.ts'
 import { searchOf } from './address.ts'
 import './calculators.css'
 import { CopyLink } from './CopyLink.tsx'
@@ -25,7 +29,8 @@ import { placeCautions, summaryOf } from './results.ts'
 import { Figures, Lists } from './Results.tsx'
 import { SourcesAndLimits } from './SourcesAndLimits.tsx'
 import { TakeAway } from './TakeAway.tsx'
-import { textsOf } from './texts-of.ts'
+import { exampleForm } from './example-form.ts'
+import { Uncertainty } from './Uncertainty.tsx'
 
 export interface CalculatorProps {
   definition: CalculatorDefinition
@@ -43,11 +48,20 @@ export interface CalculatorProps {
   plot?: (solved: Solved) => ReactNode
 }
 
+/** Its ranges and cautions are said in these units. */
+const solveIn = (system: UnitSystem, definition: CalculatorDefinition, form: Form) => {
+  showUnitsOf(system)
+  return solveForm(definition, form)
+}
+
 /** How long after the last key a change is said and written to the address. */
 const settleMilliseconds = 700
 
 interface State {
   form: Form
+  /** As it started: nothing was written yet. */
+  isUntouched: boolean
+  system: UnitSystem
   /** The last form that could be worked out. */
   good: Form | undefined
 }
@@ -61,17 +75,22 @@ const LiveDrawing = memo(function LiveDrawing({ id, solved }: { id: string; solv
 /** A live calculator: the fields keep what is written; everything else is worked out from them as it is drawn. */
 export function Calculator({ definition, preset, texts, show, headingLevel, onSettle, plot }: CalculatorProps) {
   const { id } = definition
-  const [{ form, good }, setState] = useState<State>(() => {
+  const system = useUnits()
+  const start = (): State => {
     const form = startForm(definition, texts ?? preset)
-    return { form, good: solveForm(definition, form).solution ? form : undefined }
-  })
+    return { form, good: solveForm(definition, form).solution ? form : undefined, isUntouched: true, system }
+  }
+  const [state, setState] = useState(start)
+  // What was written stays as it was written; a form that nobody touched starts again in the other units.
+  if (state.system !== system) setState(state.isUntouched ? start() : { ...state, system })
+  const { form, good } = state
   const [said, setSaid] = useState('')
   const [example, setExample] = useState<Form>()
   const settling = useRef<number>(undefined)
   const headingId = useId()
 
-  const attempt = useMemo(() => solveForm(definition, form), [definition, form])
-  const kept = useMemo(() => (good ? solveForm(definition, good) : undefined), [definition, good])
+  const attempt = useMemo(() => solveIn(system, definition, form), [definition, form, system])
+  const kept = useMemo(() => (good ? solveIn(system, definition, good) : undefined), [definition, good, system])
   const solved = attempt.solution ? attempt : kept?.solution ? kept : undefined
   const errors = attempt.solution ? {} : attempt.errors
   const drawn = useDeferredValue(solved)
@@ -80,7 +99,7 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
 
   const put = (next: Form) => {
     const result = solveForm(definition, next)
-    setState({ form: next, good: result.solution ? next : good })
+    setState({ form: next, good: result.solution ? next : good, isUntouched: false, system })
     window.clearTimeout(settling.current)
     settling.current = window.setTimeout(() => {
       setSaid(
@@ -92,7 +111,7 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
     }, settleMilliseconds)
   }
   const tryExample = () => {
-    const next = startForm(definition, textsOf(definition, definition.example.inputs))
+    const next = exampleForm(definition)
     setExample(next)
     put(next)
   }
@@ -123,6 +142,7 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
           {definition.title}
         </Heading>
       )}
+      {isAlone && <UnitChoice chosen={system} />}
       <div className="calculator-columns">
         <form className="calculator-fields" onSubmit={(event) => event.preventDefault()} noValidate>
           <UntilReady>
@@ -157,9 +177,10 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
           {solved && (
             <div className={isStale ? 'stale' : undefined}>
               <Figures definition={definition} outputs={solved.solution.outputs} keys={keys} cautions={cautions} />
-              {drawn && <LiveDrawing id={id} solved={drawn} />}
+              {drawn && <LiveDrawing key={system} id={id} solved={drawn} />}
               <Lists definition={definition} outputs={solved.solution.outputs} keys={keys} />
-              {drawn && plot?.(drawn)}
+              {drawn && <Uncertainty definition={definition} {...drawn} level={Subheading} />}
+              {drawn && <Fragment key={`plots ${system}`}>{plot?.(drawn)}</Fragment>}
               <Subheading className="calculator-subheading">Working</Subheading>
               <Working steps={(drawn ?? solved).solution.working} />
               {isAlone && attempt.solution && (

@@ -5,6 +5,7 @@ import type { TableId } from '#calc/tables/table.ts'
 import { tables } from '#calc/tables/tables.ts'
 import { FindField } from '../../components/FindField.tsx'
 import { showTable } from '../../lib/trade-tables.ts'
+import { useUnits } from '../../lib/unit-preference.ts'
 import './table-dialog.css'
 import { offersOf, rowWords } from './table-offers.ts'
 
@@ -20,14 +21,14 @@ interface TableDialogProps {
 /** The rows of a table to choose from. */
 export function TableDialog({ table: tableId, columns, onChoose, onShut, backTo }: TableDialogProps) {
   const id = useId()
+  useUnits()
   const [find, setFind] = useState('')
   const table = tables[tableId]
-  const system = 'metric'
-  const { rows, sources } = showTable(table, { find, system })
+  const { rows, sources } = showTable(table, find)
   const others = Object.keys(table.columns).filter((key) => !columns.includes(key))
   const choices = rows.flatMap(({ number, source }) => {
     const row = table.rows[number]!
-    const offers = offersOf(table, row, columns, system)
+    const offers = offersOf(table, row, columns)
     return offers.length > 0 ? [{ number, row, source: sources[source]!, offers }] : []
   })
 
@@ -50,9 +51,9 @@ export function TableDialog({ table: tableId, columns, onChoose, onShut, backTo 
             <li key={number}>
               <div>
                 <p id={`${id}-${number}`} className="choice-words">
-                  {rowWords(table, row, others, system)}
+                  {rowWords(table, row, others)}
                 </p>
-                {columns.length > 1 && <p className="quiet">{rowWords(table, row, columns, system)}</p>}
+                {columns.length > 1 && <p className="quiet">{rowWords(table, row, columns)}</p>}
                 {sources.length > 1 && <p className="choice-source">{source}</p>}
               </div>
               <div className="choice-offers">

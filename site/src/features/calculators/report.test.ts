@@ -3,13 +3,13 @@ import { friction } from '#calc/pipe/friction.ts'
 import { penstock } from '#calc/pipe/penstock.ts'
 import { solveDefinition } from '#calc/solve-definition.ts'
 import type { CalculatorDefinition } from '#calc/index.ts'
-import { startForm, solveForm } from './form.ts'
+import { solveForm } from './form.ts'
 import { givenValues } from './given-values.ts'
 import { asCells, asText, type Report } from './report.ts'
-import { textsOf } from './texts-of.ts'
+import { exampleForm } from './example-form.ts'
 
 const reportOf = (definition: CalculatorDefinition): Report => {
-  const form = startForm(definition, textsOf(definition, definition.example.inputs))
+  const form = exampleForm(definition)
   return {
     definition,
     given: givenValues(definition, form),
@@ -19,7 +19,7 @@ const reportOf = (definition: CalculatorDefinition): Report => {
 }
 
 test.each([friction, penstock] as CalculatorDefinition[])('the example of $id stands in its form', (definition) => {
-  const form = startForm(definition, textsOf(definition, definition.example.inputs))
+  const form = exampleForm(definition)
   expect(solveForm(definition, form)).toMatchObject({
     solution: { outputs: solveDefinition(definition, definition.example.inputs).outputs },
   })

@@ -8,7 +8,7 @@ import { roughness } from '#calc/tables/roughness.ts'
 import { offersOf, rowWords } from './table-offers.ts'
 
 const offers = (table: Table, isIt: (row: Table['rows'][number]) => boolean, wanted: string[]) =>
-  offersOf(table, table.rows.find(isIt)!, wanted, 'metric').map(({ words, values }) => ({
+  offersOf(table, table.rows.find(isIt)!, wanted).map(({ words, values }) => ({
     words: words.replaceAll('\u00a0', ' '),
     values,
   }))
@@ -54,6 +54,6 @@ test('a row that knows nothing of what is wanted offers nothing; what it knows i
 
 test('a row is named by its words and by its figures with their columns', () => {
   const row = pePipe.rows.find(({ nominal, sdr }) => nominal === 90 && sdr === 13.6)!
-  expect(rowWords(pePipe, row, ['nominal', 'sdr'], 'metric')).toBe('Nominal size dn 90, SDR 13.6')
-  expect(rowWords(roughness, roughness.rows[1], ['wall', 'state'], 'metric')).toBe('polyethylene (PE) or PVC, new')
+  expect(rowWords(pePipe, row, ['nominal', 'sdr'])).toBe('Nominal size dn 90, SDR 13.6')
+  expect(rowWords(roughness, roughness.rows[1], ['wall', 'state'])).toBe('polyethylene (PE) or PVC, new')
 })
