@@ -1,10 +1,10 @@
+import type { Quantity } from '#calc/index.ts'
 import type { Table, TableCell, TableColumn } from '#calc/tables/table.ts'
 import { fieldText, format, formatNumber, join } from '#calc/units/format.ts'
-import { conversion, quantities } from '#calc/units/quantities.ts'
+import { quantities } from '#calc/units/quantities.ts'
+import { shownUnit } from '#calc/units/system.ts'
 
-export type UnitSystem = 'metric' | 'imperial'
-
-/** A table as it is shown: figures in the units chosen, sources numbered. */
+/** A table as it is shown: figures in the units that are shown, sources numbered. */
 export interface ShownTable {
   table: Table
   columns: readonly ShownColumn[]
@@ -48,49 +48,38 @@ const columnsOf = (table: Table): readonly PartOfColumn[] =>
     table.rows.some((row) => isThree(row[key])) ? parts.map((part) => ({ key, column, part })) : [{ key, column }],
   )
 
-const imperial = new Map<string, string>([
-  ['mm', 'in'],
-  ['m', 'ft'],
-  ['bar', 'psi'],
-  ['kPa', 'psi'],
-  ['GPa', 'psi'],
-  ['°C', '°F'],
-])
-
-const unitOf = ({ quantity, unit }: TableColumn, system: UnitSystem): string => {
-  if (!quantity) return ''
-  const metric = unit ?? quantities[quantity].units[0]!.name
-  const other = system === 'imperial' ? imperial.get(metric) : undefined
-  return quantities[quantity].units.some(({ name }) => name === other) ? other! : metric
-}
+/** The unit that a column was printed in, and the one it is shown in. */
+const printedUnit = (quantity: Quantity, { unit }: TableColumn): string => unit ?? quantities[quantity].units[0]!.name
+const unitOf = (column: TableColumn): string =>
+  column.quantity ? shownUnit(column.quantity, printedUnit(column.quantity, column)) : ''
 
 /** Digits of a figure that was turned into other units; in its own it keeps those it was printed with. */
 const turnedDigits = 4
 
-const numberText = (value: number, column: TableColumn, system: UnitSystem): string => {
+const numberText = (value: number, column: TableColumn): string => {
   const quantity = column.quantity!
-  const unit = unitOf(column, system)
+  const unit = unitOf(column)
   if (column.digits) return format(value, quantity, { digits: column.digits, unit }).text
-  if (unit === unitOf(column, 'metric')) return fieldText(value, quantity, unit)
-  const named = quantities[quantity].units.find(({ name }) => name === unit)!
-  const turned = Number(conversion(quantity, named)!.fromSi(value).toPrecision(turnedDigits))
+  const text = fieldText(value, quantity, unit)
+  if (unit === printedUnit(quantity, column)) return text
+  const turned = Number(Number(text).toPrecision(turnedDigits))
   const size = Math.abs(turned)
   return size !== 0 && (size < 1e-4 || size >= 1e4) ? formatNumber(turned, turnedDigits) : String(turned)
 }
 
 /** A figure with its unit. */
-export const sayFigure = (value: number, column: TableColumn, system: UnitSystem): string =>
-  join({ text: numberText(value, column, system), unit: unitOf(column, system) })
+export const sayFigure = (value: number, column: TableColumn): string =>
+  join({ text: numberText(value, column), unit: unitOf(column) })
 
-const cellTexts = (cell: TableCell | undefined, column: TableColumn, system: UnitSystem): readonly string[] => {
+const cellTexts = (cell: TableCell | undefined, column: TableColumn): readonly string[] => {
   if (cell === undefined || cell === '') return []
-  return typeof cell === 'string' ? [cell] : [cell].flat().map((value) => numberText(value, column, system))
+  return typeof cell === 'string' ? [cell] : [cell].flat().map((value) => numberText(value, column))
 }
 
-const cellsOf = (table: Table, row: Row, system: UnitSystem) =>
+const cellsOf = (table: Table, row: Row) =>
   columnsOf(table).map(({ key, column, part }) => {
     const cell = row[key]
-    return cellTexts(part && isThree(cell) ? cell[parts.indexOf(part)] : cell, column, system)
+    return cellTexts(part && isThree(cell) ? cell[parts.indexOf(part)] : cell, column)
   })
 
 /** Words and numbers apart: "SDR11" is "sdr" and "11". */
@@ -109,18 +98,18 @@ const hasWord = (words: readonly string[], wanted: string) => {
 }
 
 /** The rows that have every word looked for, in the table's name, a column's name or a cell. */
-export const showTable = (table: Table, { find = '', system }: { find?: string; system: UnitSystem }): ShownTable => {
+export const showTable = (table: Table, find = ''): ShownTable => {
   const wanted = wordsIn(find)
   const columns = columnsOf(table).map(({ key, column, part }): ShownColumn => ({
     id: part ? `${key} ${part}` : key,
     label: part ? `${column.label}, ${part}` : column.label,
-    unit: unitOf(column, system),
+    unit: unitOf(column),
     isNumber: column.quantity !== undefined,
   }))
   const common = wordsIn([table.title, ...columns.flatMap(({ label, unit }) => [label, unit])].join(' '))
   const sources: string[] = []
   const rows = table.rows.flatMap((row, number): ShownRow[] => {
-    const cells = cellsOf(table, row, system)
+    const cells = cellsOf(table, row)
     const words = [...common, ...cells.flat().flatMap(wordsIn)]
     if (!wanted.every((word) => hasWord(words, word))) return []
     if (!sources.includes(row.source)) sources.push(row.source)

@@ -2,14 +2,16 @@ import { Link, useParams } from 'react-router-dom'
 import { calculatorIndex } from 'virtual:calculator-index'
 import type { Table, TableId } from '#calc/tables/table.ts'
 import { tables } from '#calc/tables/tables.ts'
+import { FindField } from '../components/FindField.tsx'
 import { Page } from '../components/Page.tsx'
 import { NotFound } from '../components/RouteError.tsx'
-import { FindField } from '../components/FindField.tsx'
+import { UnitChoice } from '../components/UnitChoice.tsx'
 import { TakeTable } from '../features/tables/TakeTable.tsx'
 import { TradeTable } from '../features/tables/TradeTable.tsx'
 import { useFindInAddress, useFindText } from '../features/tables/use-find.ts'
 import '../features/tables/table-list.css'
 import { showTable } from '../lib/trade-tables.ts'
+import { useUnits } from '../lib/unit-preference.ts'
 
 const isTable = (id: string): id is TableId => Object.hasOwn(tables, id)
 
@@ -48,7 +50,8 @@ function TablePage({ table }: { table: Table }) {
 
 function Rows({ table, ...address }: { table: Table; find: string; write: (text: string) => void }) {
   const [text, change] = useFindText(address)
-  const shown = showTable(table, { find: text, system: 'metric' })
+  const units = useUnits()
+  const shown = showTable(table, text)
   return (
     <>
       <FindField
@@ -58,6 +61,7 @@ function Rows({ table, ...address }: { table: Table; find: string; write: (text:
         text={text}
         onText={change}
       />
+      <UnitChoice chosen={units} />
       {shown.rows.length > 0 ? (
         <>
           <TradeTable shown={shown} />

@@ -1,11 +1,13 @@
 import { Link } from 'react-router-dom'
 import { tables } from '#calc/tables/tables.ts'
-import { Page } from '../components/Page.tsx'
 import { FindField } from '../components/FindField.tsx'
+import { Page } from '../components/Page.tsx'
+import { UnitChoice } from '../components/UnitChoice.tsx'
 import { TradeTable } from '../features/tables/TradeTable.tsx'
 import { useFindInAddress, useFindText } from '../features/tables/use-find.ts'
 import '../features/tables/table-list.css'
 import { showTable } from '../lib/trade-tables.ts'
+import { useUnits } from '../lib/unit-preference.ts'
 
 const all = Object.values(tables)
 
@@ -29,7 +31,8 @@ export function Component() {
 
 function Rows(address: { find: string; write: (text: string) => void }) {
   const [text, change] = useFindText(address)
-  const found = text.trim() === '' ? undefined : all.map((table) => showTable(table, { find: text, system: 'metric' }))
+  const units = useUnits()
+  const found = text.trim() === '' ? undefined : all.map((table) => showTable(table, text))
   return (
     <>
       <FindField
@@ -39,7 +42,14 @@ function Rows(address: { find: string; write: (text: string) => void }) {
         text={text}
         onText={change}
       />
-      {found ? <Found found={found.filter(({ rows }) => rows.length > 0)} find={text} /> : <AllTables />}
+      {found ? (
+        <>
+          <UnitChoice chosen={units} />
+          <Found found={found.filter(({ rows }) => rows.length > 0)} find={text} />
+        </>
+      ) : (
+        <AllTables />
+      )}
     </>
   )
 }
