@@ -17,6 +17,10 @@ import { sweptBend } from './pipe/swept-bend.ts'
 import { thrust } from './pipe/thrust.ts'
 import { flowByBucket } from './site/flow-by-bucket.ts'
 import { headByGauge } from './site/head-by-gauge.ts'
+import { annualEnergy } from './water/annual-energy.ts'
+import { energyValue } from './water/energy-value.ts'
+import { flowDuration } from './water/flow-duration.ts'
+import { loadDay } from './water/load-day.ts'
 import { power } from './water/power.ts'
 import { water } from './water/water.ts'
 
@@ -24,6 +28,10 @@ import { water } from './water/water.ts'
 export const calculators = {
   water,
   power,
+  'flow-duration': flowDuration,
+  'annual-energy': annualEnergy,
+  'energy-value': energyValue,
+  'load-day': loadDay,
   'head-by-gauge': headByGauge,
   'flow-by-bucket': flowByBucket,
   friction,

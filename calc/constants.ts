@@ -24,5 +24,8 @@ export const hoursPerYear = { value: 8760, unit: 'h', source: '365 days of 24 ho
 
 export const secondsPerHour = 3600
 
+/** Seconds in a year of 365 days. */
+export const secondsPerYear = hoursPerYear.value * secondsPerHour
+
 /** Joules in a kilowatt-hour. */
 export const joulesPerKilowattHour = 1000 * secondsPerHour

@@ -1,9 +1,7 @@
-import { g, gravity, hoursPerYear, secondsPerHour } from '../constants.ts'
+import { g, gravity, secondsPerYear } from '../constants.ts'
 import { defineCalculator } from '../definition.ts'
 import { waterTemperature } from './inputs.ts'
 import { waterDensity } from './properties.ts'
-
-const secondsPerYear = hoursPerYear.value * secondsPerHour
 
 /**
  * Power of falling water P = ρgQH and what comes out of it, P·η, with flow Q (m³/s), net head H (m), efficiency η (0–1, over everything
