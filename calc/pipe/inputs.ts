@@ -18,6 +18,7 @@ export const insideDiameter = {
   help: 'the bore: outside diameter less two walls',
   range: [0.001, 20],
   usual: [0.02, 2],
+  pick: { table: 'pe-pipe', column: 'insideDiameter' },
 } as const satisfies Scalar
 
 export const pipeLength = {
@@ -39,4 +40,5 @@ export const roughness = {
   range: [0, 0.05],
   usual: [1.5e-6, 3e-3],
   unit: 'mm',
+  pick: { table: 'roughness', column: 'roughness' },
 } as const satisfies Scalar

@@ -1,3 +1,4 @@
+import AxeBuilder from '@axe-core/playwright'
 import { expect, test } from '@playwright/test'
 
 test('a size is found in all tables, and its address finds it again', async ({ page }) => {
@@ -56,4 +57,38 @@ test('a long table keeps its heads in sight, and a wide one moves in its own box
 test('there is no table of another name', async ({ page }) => {
   await page.goto('/tables/perpetual-motion')
   await expect(page.getByText('There is no table here.', { exact: false })).toBeVisible()
+})
+
+test('a calculator takes a figure from a table, by keyboard alone', async ({ page }) => {
+  await page.goto('/calculators/friction')
+  const way = page.getByRole('button', { name: 'From a table' }).last()
+  await way.focus()
+  await page.keyboard.press('Enter')
+  const dialog = page.getByRole('dialog', { name: 'Roughness of pipe walls' })
+  await expect(dialog).toBeVisible()
+  const { violations } = await new AxeBuilder({ page }).analyze()
+  expect(violations).toEqual([])
+
+  await dialog.getByLabel('Find').fill('welded good')
+  await dialog.getByRole('button', { name: /^Most 0\.1 mm\s+welded steel, in good condition/ }).focus()
+  await page.keyboard.press('Enter')
+  await expect(dialog).toBeHidden()
+  await expect(way).toBeFocused()
+  await expect(page.getByLabel(/^Roughness/)).toHaveValue(/^0\.1( mm)?$/)
+
+  await page.keyboard.press('Enter')
+  await expect(dialog).toBeVisible()
+  await page.keyboard.press('Escape')
+  await expect(dialog).toBeHidden()
+  await expect(way).toBeFocused()
+})
+
+test('figures turn into the other units, and stay so', async ({ page }) => {
+  await page.goto('/tables/pe-pipe?find=110+13.6')
+  await expect(page.getByRole('row', { name: '110 13.6 110 8.1 93.8' })).toBeVisible()
+  await page.getByLabel('imperial').check()
+  // 110 ÷ 25.4, 8.1 ÷ 25.4, 93.8 ÷ 25.4
+  await expect(page.getByRole('row', { name: '110 13.6 4.331 0.3189 3.693' })).toBeVisible()
+  await page.reload()
+  await expect(page.getByRole('columnheader', { name: 'Inside diameter, in' })).toBeVisible()
 })
