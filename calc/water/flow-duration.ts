@@ -18,7 +18,7 @@ const fewYears = 10
 const daysOfYear = 365
 
 const shares = [
-  { key: 'q10', share: 0.1, say: 'a day in ten' },
+  { key: 'q10', share: 0.1, say: 'one day in ten' },
   { key: 'q50', share: 0.5, say: 'half of the days' },
   { key: 'q80', share: 0.8, say: 'four days in five' },
   { key: 'q95', share: 0.95, say: 'all but one day in twenty' },
@@ -105,12 +105,12 @@ export const flowDuration = defineCalculator({
         const stands = `${share} × ${days + 1} = ${Number((above + part).toFixed(2))}`
         return part < 1e-9
           ? {
-              say: `What ${say} give: rank ${stands}.`,
+              say: `Reached or passed on ${say}: rank ${stands}.`,
               formula: write`${key} = ${day(above)}`,
               gives: key,
             }
           : {
-              say: `What ${say} give: rank ${stands}, that far between two days.`,
+              say: `Reached or passed on ${say}: rank ${stands}, that far between two days.`,
               formula: write`${key} = ${day(above)} - ${between} \, (${day(above)} - ${day(above + 1)})`,
               gives: key,
             }
