@@ -86,6 +86,8 @@ const greek: Readonly<Record<string, string>> = {
 const plain = (tex: string) =>
   tex
     .replace(/\\(?:text|mathrm)\{([^{}]*)\}/g, '$1')
+    // A mean is written with a bar over its letter.
+    .replace(/\\bar\{?(\w)\}?/g, '$1\u0304')
     .replace(/\\([A-Za-z]+)\s*/g, (_, name: string) => greek[name] ?? name)
     .replace(/[{}]/g, '')
 

@@ -13,7 +13,7 @@ export function UnitChoice({ chosen }: { chosen: UnitSystem }) {
   const name = useId()
   return (
     <fieldset className="unit-choice no-print">
-      <legend>Units shown</legend>
+      <legend>Units</legend>
       {systems.map(({ system, words }) => (
         <label key={system}>
           <input type="radio" name={name} checked={chosen === system} onChange={() => preferUnits(system)} />

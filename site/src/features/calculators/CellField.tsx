@@ -3,7 +3,8 @@ import type { Cell } from '#calc/index.ts'
 import { say } from '#calc/units/format.ts'
 import { ChoiceField, QuantityField } from '../../components/QuantityField.tsx'
 import { capital } from './columns.ts'
-import { unitOf, unitsOf, type FieldText, type FormAction } from './form.ts'
+import { unitOf, unitsOf, type FieldText } from './field-text.ts'
+import type { FormAction } from './form.ts'
 
 export interface CellFieldProps {
   idOf: (path: string) => string

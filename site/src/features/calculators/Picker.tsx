@@ -9,13 +9,15 @@ interface PickerProps {
   name: string
   pathOf: (name: string) => string
   change: (action: FormAction) => void
+  /** What the button says. */
+  words?: string
 }
 
 type Numbers = Extract<Cell, { kind: 'scalar' }>
 const isNumber = (cell: { kind: string }): cell is Numbers => cell.kind === 'scalar'
 
 /** At the first field that a table of the trade can fill: the way to that table, which fills them all. */
-export function Picker({ cells, name, pathOf, change }: PickerProps) {
+export function Picker({ cells, name, pathOf, change, words }: PickerProps) {
   const own = cells[name]!
   const table = isNumber(own) ? own.pick?.table : undefined
   const filled = Object.entries(cells).flatMap(([key, cell]) =>
@@ -25,6 +27,7 @@ export function Picker({ cells, name, pathOf, change }: PickerProps) {
   return (
     <TablePicker
       table={table}
+      words={words}
       columns={filled.map(({ column }) => column)}
       onChoose={(values) => {
         const texts = filled.flatMap(({ key, cell, column }) => {

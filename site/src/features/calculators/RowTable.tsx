@@ -4,7 +4,8 @@ import { MathSymbol } from '../../components/Formula.tsx'
 import { unitWords } from '../../components/QuantityField.tsx'
 import { choiceOptions, helpOf } from './CellField.tsx'
 import { capital, columnsOf, pathOf, rowWord, type ListInput } from './columns.ts'
-import { unitOf, unitsOf, type RowTexts } from './form.ts'
+import { unitOf, unitsOf } from './field-text.ts'
+import type { RowTexts } from './form.ts'
 import type { ManyProps } from './ListField.tsx'
 import { Picker } from './Picker.tsx'
 
@@ -37,10 +38,13 @@ export function RowTable({
   const spare = columns.filter(([name, { optional }]) => optional && !isUsed(name))
   const shown = asked ? columns : columns.filter((column) => !spare.includes(column))
   const first = rows[0]
+  /** The row that was last in hand: a figure from a table goes there. */
+  const [inHand, setInHand] = useState(0)
+  const target = Math.min(inHand, rows.length - 1)
 
   return (
     <>
-      <table className="row-table">
+      <table className={columns.length > 1 ? 'row-table' : 'row-table row-table-one'}>
         <thead>
           <tr>
             <th scope="col">
@@ -83,6 +87,7 @@ export function RowTable({
                     id: idOf(at),
                     'aria-invalid': errors[at] ? true : undefined,
                     'aria-describedby': errors[at] ? `${idOf(at)}-error` : undefined,
+                    onFocus: () => setInHand(i),
                     onPaste: (event: ClipboardEvent) => onPaste(event, i, name),
                     onKeyDown: (event: KeyboardEvent) => onMove(event, i, name),
                   } as const
@@ -121,14 +126,6 @@ export function RowTable({
                           <span className={isOwn ? 'cell-unit cell-unit-own' : 'cell-unit'}>{unitOf(cell, field)}</span>
                         )}
                       </span>
-                      {input.kind === 'rows' && (
-                        <Picker
-                          cells={input.columns}
-                          name={name}
-                          pathOf={(other) => pathOf(input, path, i, other)}
-                          change={change}
-                        />
-                      )}
                     </td>
                   )
                 })}
@@ -149,6 +146,18 @@ export function RowTable({
           })}
         </tbody>
       </table>
+      {input.kind === 'rows' &&
+        target >= 0 &&
+        shown.map(([name]) => (
+          <Picker
+            key={name}
+            cells={input.columns}
+            name={name}
+            pathOf={(other) => pathOf(input, path, target, other)}
+            change={change}
+            words={`${input.columns[name]!.label} from a table, for ${word} ${target + 1}`}
+          />
+        ))}
       <ColumnHelp cells={shown.map(([, cell]) => cell)} />
       {(asked || spare.length > 0) && (
         <button type="button" className="plain-button no-print" aria-expanded={asked} onClick={() => setAsked(!asked)}>

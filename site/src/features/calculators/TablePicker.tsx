@@ -8,12 +8,13 @@ interface TablePickerProps {
   columns: readonly string[]
   /** SI, by column; a column of which the row knows nothing is left away. */
   onChoose: (values: Readonly<Record<string, number>>) => void
+  words?: string
 }
 
 type Dialog = typeof import('./TableDialog.tsx').TableDialog
 
 /** A button that brings a table of the trade, and takes the figures of the row that is chosen there. Nothing of it is loaded before. */
-export function TablePicker({ table, columns, onChoose }: TablePickerProps) {
+export function TablePicker({ table, columns, onChoose, words = 'From a table' }: TablePickerProps) {
   const [phase, setPhase] = useState<'shut' | 'loading' | 'failed' | 'open'>('shut')
   const [Dialog, setDialog] = useState<Dialog>()
   const button = useRef<HTMLButtonElement>(null)
@@ -32,7 +33,7 @@ export function TablePicker({ table, columns, onChoose }: TablePickerProps) {
   return (
     <div className="table-picker no-print">
       <button ref={button} type="button" className="plain-button" aria-haspopup="dialog" onClick={() => void open()}>
-        From a table
+        {words}
       </button>
       <span role="status">{phase === 'loading' && 'The table is on its way.'}</span>
       {phase === 'failed' && (

@@ -1,7 +1,9 @@
 import type { CalculatorDefinition, Cell } from '#calc/index.ts'
 import { parse } from '#calc/units/parse.ts'
-import { columnsOfRow, isMany, isRecord, pathOf } from './columns.ts'
-import { shownKeys, startForm, type FieldText, type Form, type Texts } from './form.ts'
+import { columnsOf, columnsOfRow, isMany, isRecord, pathOf, type ScalarCell } from './columns.ts'
+import type { FieldText } from './field-text.ts'
+import { shownKeys, startForm, type Form, type Texts } from './form.ts'
+import { lineWithUnit } from './line-text.ts'
 
 /** The inputs of a calculator in an address: `?flow=9.5+L/s&sections.0.length=120+m`. Text goes out and comes back as it was written. */
 
@@ -34,6 +36,10 @@ export const textsOf = (definition: CalculatorDefinition, form: Form): Record<st
     const rows = form.rows[key]!
     if (rows.length === 0 && start.rows[key]!.length > 0) texts[key] = ''
     rows.forEach((row, i) => {
+      if (input.kind === 'runs') {
+        texts[pathOf(input, key, i, '')] = lineWithUnit(columnsOf(input)[''] as ScalarCell, row['']!)
+        return
+      }
       for (const [name, cell] of Object.entries(columnsOfRow(input, row))) {
         const starting = input.kind === 'group' ? start.rows[key]![0]![name]!.text : cell.initial
         write(cell, pathOf(input, key, i, name), row[name]!, starting === undefined || starting === '')

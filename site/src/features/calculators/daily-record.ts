@@ -1,286 +1,343 @@
-import Papa from 'papaparse'
-
-/** A record of daily flows as a file holds it: a date and a flow in each row, whatever its delimiters, commas, dates and gaps. */
+/**
+ * A file or a paste of daily flows, read into flows day by day. Nothing is made up and nothing goes silently: what was taken on trust or
+ * left out is said.
+ */
+import { format, join } from '#calc/units/format.ts'
+import { conversion, quantities } from '#calc/units/quantities.ts'
+import {
+  chooseOrder,
+  dayOf,
+  isoDate,
+  type ChosenOrder,
+  type DateOrder,
+  type DayOrMonthFirst,
+} from './daily-record-dates.ts'
+import { chooseMark, readNumber, type DecimalMark } from './daily-record-numbers.ts'
+import { dateIn, excerpt, readTable, type Row, type Table } from './daily-record-table.ts'
 
 export const flowUnits = ['L/s', 'm³/s', 'ft³/s'] as const
 export type FlowUnit = (typeof flowUnits)[number]
-export type DateOrder = 'day-first' | 'month-first'
 
-/** What the file does not say clearly, decided by its owner. */
+/** What the data leave open, or what a person knows better. */
 export interface RecordOptions {
-  unit?: FlowUnit
-  dateOrder?: DateOrder
-  /** By its place from 0. */
+  dateOrder?: DayOrMonthFirst
+  /** The column with the flows, from 1. */
   flowColumn?: number
+  unit?: FlowUnit
+  decimalMark?: DecimalMark
 }
 
-/** A cell that is no flow of a day. Row and column count from 1, as a spreadsheet shows them. */
+export interface RecordDay {
+  /** ISO 8601; absent where the record has no dates. */
+  date?: string
+  /** m³/s. */
+  flow: number
+}
+
+/** A cell that was not taken. Rows and columns count from 1, comments, names and empty lines included. */
 export interface RecordProblem {
   row: number
   column: number
   cell: string
   say: string
+  /** Whether the record cannot be used before this is put right; otherwise the day is a gap. */
+  isRefused: boolean
+}
+
+/** How a record was read, with what else there is to choose: for the options of another reading. */
+export interface Reading {
+  flowColumn: number
+  flowColumns: readonly { column: number; name: string }[]
+  unit: FlowUnit
+  /** Whether the file names it. */
+  unitIsNamed: boolean
+  dateOrder?: DateOrder
+  /** Set where this order fits as well. */
+  otherDateOrder?: DayOrMonthFirst
+  decimalMark: DecimalMark
+  /** Set where the other mark fits as well. */
+  otherDecimalMark?: DecimalMark
 }
 
 export interface DailyRecord {
-  /** In order of their dates; flows in m³/s. */
-  days: readonly { date?: string; flow: number }[]
-  /** Days between the first and the last of which there is no flow. */
-  missing: number
-  unit: FlowUnit
-  /** The file does not name a unit: that one was taken. */
-  isUnitGuessed: boolean
-  dateOrder?: DateOrder
-  /** The dates can be read in both orders. */
-  isOrderGuessed: boolean
-  /** Columns that could be the flow, by place and name. */
-  flowColumns: readonly { column: number; name: string }[]
-  flowColumn: number
-  /** What was understood, in sentences. */
-  notes: readonly string[]
-  /** Cells that were left out: their days are gaps. */
-  leftOut: readonly RecordProblem[]
+  /** In the order of their dates, or of the file where it has none; empty if anything was refused. */
+  days: RecordDay[]
+  /** What was done with the record, in sentences. */
+  notes: string[]
+  problems: RecordProblem[]
+  /** Absent where the text is no table. */
+  reading?: Reading
 }
 
-export type RecordReading = { record: DailyRecord } | { refused: string; problems: readonly RecordProblem[] }
+const unitSpellings: Record<FlowUnit, RegExp> = {
+  'ft³/s': /ft\s?(3|³|\^3)\s?(\/|per )\s?s|\bcfs\b|\bcusecs?\b|cubic (foot|feet)( per |\/)s/i,
+  'm³/s':
+    /m\s?(3|³|\^3|\*\*3)\s?(\/|per )\s?s|m(3|³|\^3)[ .·]?s\^?(-1|⁻¹)|\bcumecs?\b|\bcms\b|cubic met(re|er)s?( per |\/)s/i,
+  'L/s': /\bl\s?\/\s?s|\bl[ .·]?s\^?(-1|⁻¹)|\blps\b|lit(re|er)s?( per |\/)s/i,
+}
+/** Other things that daily figures are given in. */
+const otherUnit =
+  /(m3|m³|m\^3|ml|mgal|gal|gpm|mgd|\bl|mm|in|acre-?f(ee)?t|af)\s*(\/|per )\s*(d|h|min)|\bmgd\b|\bgpm\b|\bml\/d/i
+const flowWords = /flow|discharge|débit|debit|abfluss|durchfluss|caudal|portata|\bq\b|m3\/s|m³\/s|l\/s|cfs|cumec/i
 
-const toSi: Readonly<Record<FlowUnit, number>> = { 'L/s': 0.001, 'm³/s': 1, 'ft³/s': 0.3048 ** 3 }
-const unitWords: readonly (readonly [RegExp, FlowUnit])[] = [
-  [/\bft3|\bft³|ft\^3|cfs|cusec/i, 'ft³/s'],
-  [/\bm3|\bm³|m\^3|cumec|\bcms\b/i, 'm³/s'],
-  [/\bl\s*\/\s*s|\blps\b|\bl\/sec|lit(?:re|er)s? per second/i, 'L/s'],
-]
+const unitsIn = (text: string): FlowUnit[] => flowUnits.filter((unit) => unitSpellings[unit].test(text))
 
-const day = 86_400_000
+const times = (count: number, one: string, many = `${one}s`): string => `${count} ${count === 1 ? one : many}`
 
-/** `12,5` and `1.234,5` as well as `12.5` and `1,234.5`; undefined for what is no number. */
-const numberIn = (cell: string): number | undefined => {
-  const text = cell.trim().replace(/[\u00a0\u202f ']/g, '')
-  if (!/^[+\-−]?(?:\d+(?:[.,]\d*)?|[.,]\d+|\d{1,3}(?:[.,]\d{3})+[.,]\d*)(?:e[+-]?\d+)?$/i.test(text)) return undefined
-  const mark = Math.max(text.lastIndexOf('.'), text.lastIndexOf(','))
-  const plain = mark < 0 ? text : `${text.slice(0, mark).replace(/[.,]/g, '')}.${text.slice(mark + 1)}`
-  return Number(plain.replace('−', '-'))
+const list = (items: readonly string[]): string =>
+  items.length < 2 ? items.join('') : `${items.slice(0, -1).join(', ')} and ${items.at(-1)!}`
+
+const nameOf = ({ head }: Table, column: number): string => {
+  const names = head.map(({ cells }) => cells[column] ?? '').filter((name) => /\p{L}/u.test(name))
+  return names.find((name) => flowWords.test(name)) ?? names.at(-1) ?? ''
 }
 
-interface DateParts {
-  year: number
-  a: number
-  b: number
-  isYearFirst: boolean
-}
-
-const datePattern = /^(\d{4}|\d{1,2})[-/. ](\d{1,2})[-/. ](\d{4}|\d{2})(?:[T ,].*)?$/
-const compactPattern = /^(\d{4})(\d{2})(\d{2})$/
-
-const dateParts = (cell: string): DateParts | undefined => {
-  const text = cell.trim()
-  const compact = compactPattern.exec(text)
-  const [, first, second, third] = compact ?? datePattern.exec(text) ?? []
-  if (first === undefined || second === undefined || third === undefined) return undefined
-  if (first.length === 4) return { year: Number(first), a: Number(second), b: Number(third), isYearFirst: true }
-  const short = Number(third)
-  const year = third.length === 4 ? short : short < 70 ? 2000 + short : 1900 + short
-  return { year, a: Number(first), b: Number(second), isYearFirst: false }
-}
-
-/** Milliseconds of the day in UTC; undefined where there is no such day. */
-const timeOf = ({ year, a, b, isYearFirst }: DateParts, order: DateOrder): number | undefined => {
-  const [month, date] = isYearFirst || order === 'month-first' ? [a, b] : [b, a]
-  const time = Date.UTC(year, month - 1, date)
-  const back = new Date(time)
-  return back.getUTCMonth() === month - 1 && back.getUTCDate() === date ? time : undefined
-}
-
-const isoDate = (time: number) => new Date(time).toISOString().slice(0, 10)
-const longDate = (time: number) =>
-  new Date(time).toLocaleDateString('en-GB', { day: 'numeric', month: 'long', year: 'numeric', timeZone: 'UTC' })
-
-interface Row {
-  /** From 1, as in the file. */
-  number: number
-  cells: readonly string[]
-}
-
-const delimiters = ['\t', ';', '|', ','] as const
-
-/** Rows of cells, comments and blank lines left out. A comma is a delimiter only where nothing else is. */
-const rowsOf = (text: string): Row[] => {
-  const lines = text.replace(/^\ufeff/, '').split(/\r\n?|\n/)
-  const kept = lines.flatMap((line, i) => (line.trim() === '' || line.startsWith('#') ? [] : [{ line, number: i + 1 }]))
-  const sample = kept.slice(0, 50).map(({ line }) => line)
-  const delimiter = delimiters.find((mark) => sample.filter((line) => line.includes(mark)).length > sample.length / 2)
-  return kept.map(({ line, number }) => {
-    if (delimiter === undefined) return { number, cells: splitAtSpaces(line) }
-    const [cells = []] = Papa.parse<string[]>(line, { delimiter }).data
-    return { number, cells: joinDecimals(cells, delimiter) }
-  })
-}
-
-/** A date may be followed by a time: that is no cell of its own. */
-const splitAtSpaces = (line: string): string[] =>
-  line
-    .trim()
-    .replace(/(\d[-/.]\d{1,2}[-/.]\d+) \d{1,2}:\d{2}(?::\d{2})?/, '$1')
-    .split(/\s+/)
-
-/** `1/10/1999,3,03` with commas both between and inside: the last two are one number. */
-const joinDecimals = (cells: readonly string[], delimiter: string): string[] => {
-  const [date = '', whole = '', part = '', ...more] = cells
-  const isSplit = delimiter === ',' && more.length === 0 && dateParts(date) && /^\d+$/.test(whole) && /^\d+$/.test(part)
-  return isSplit ? [date, `${whole},${part}`] : [...cells]
-}
-
-const most = <T>(values: readonly T[], weigh: (value: T) => number): T | undefined =>
-  values.reduce<T | undefined>(
-    (best, value) => (best === undefined || weigh(value) > weigh(best) ? value : best),
-    undefined,
+/** The column whose name speaks of flow, else the first of numbers that is no mere count of the rows. */
+const likeliestFlow = (table: Table): number => {
+  const { numbers, rows } = table
+  const counts = (column: number) =>
+    rows.length > 2 &&
+    rows.every(({ cells }, i) => i === 0 || Number(cells[column]) - Number(rows[i - 1]!.cells[column]) === 1)
+  return (
+    numbers.find((column) => flowWords.test(nameOf(table, column))) ??
+    numbers.find((column) => !counts(column)) ??
+    numbers[0]!
   )
-
-/** Which order makes the dates follow each other day by day. */
-const orderOf = (parts: readonly DateParts[]): { order: DateOrder; isGuessed: boolean } | undefined => {
-  const score = (order: DateOrder) => {
-    const times = parts.map((one) => timeOf(one, order))
-    if (times.includes(undefined)) return -1
-    return times.filter((time, i) => i > 0 && time! - times[i - 1]! === day).length
-  }
-  const [byDay, byMonth] = [score('day-first'), score('month-first')]
-  if (byDay < 0 && byMonth < 0) return undefined
-  return {
-    order: byMonth > byDay ? 'month-first' : 'day-first',
-    isGuessed: byDay === byMonth && !parts[0]!.isYearFirst,
-  }
 }
 
-const counted = (count: number, word: string) => `${count} ${word}${count === 1 ? '' : 's'}`
+interface Dated {
+  row: Row
+  day?: number
+  flow: number
+}
+
+/** The days between the first and the last that are not there, and the longest run of them. */
+const gapsOf = (days: readonly number[]): { missing: number; longest: number; after: number } => {
+  const gaps = { missing: 0, longest: 0, after: 0 }
+  days.slice(1).forEach((day, i) => {
+    const gap = day - days[i]! - 1
+    gaps.missing += gap
+    if (gap > gaps.longest) {
+      gaps.longest = gap
+      gaps.after = days[i]!
+    }
+  })
+  return gaps
+}
+
+class RecordReader {
+  private readonly notes: string[] = []
+  private readonly problems: RecordProblem[] = []
+  private readonly flowColumn: number
+  private readonly unit: FlowUnit
+  private readonly unitIsNamed: boolean
+  private readonly decimal: { mark: DecimalMark; isOpen: boolean }
+  private readonly order?: ChosenOrder
+
+  constructor(
+    private readonly table: Table,
+    private readonly options: RecordOptions,
+  ) {
+    const asked = options.flowColumn === undefined ? undefined : options.flowColumn - 1
+    this.flowColumn = asked !== undefined && table.numbers.includes(asked) ? asked : likeliestFlow(table)
+    const named = this.namedUnit()
+    this.unit = options.unit ?? named ?? 'm³/s'
+    this.unitIsNamed = named !== undefined
+    const cells = table.rows.map(({ cells }) => cells[this.flowColumn] ?? '')
+    const chosen = chooseMark(cells)
+    this.decimal = { ...chosen, ...(options.decimalMark ? { mark: options.decimalMark } : {}) }
+    const { date } = table
+    if (date) {
+      const chosenOrder = chooseOrder(table.rows.flatMap((row) => dateIn(row, date) ?? []))
+      const { dateOrder } = options
+      this.order =
+        dateOrder === undefined || chosenOrder.order === 'y-m-d'
+          ? chosenOrder
+          : { order: dateOrder, ...(chosenOrder.other ? { other: dateOrder === 'd/m/y' ? 'm/d/y' : 'd/m/y' } : {}) }
+    }
+  }
+
+  /** Named over the flows' column, or, if only one is, anywhere above the data. */
+  private namedUnit(): FlowUnit | undefined {
+    const { head, comments } = this.table
+    const over = unitsIn(head.map(({ cells }) => cells[this.flowColumn] ?? '').join(' '))
+    const anywhere = unitsIn([...head.map(({ cells }) => cells.join(' ')), ...comments].join(' '))
+    return over[0] ?? (anywhere.length === 1 ? anywhere[0] : undefined)
+  }
+
+  private refuse(row: Row, column: number, say: string): void {
+    this.problems.push(this.problem(row, column, say, true))
+  }
+
+  private leaveOut(row: Row, column: number, say: string): void {
+    this.problems.push(this.problem(row, column, say, false))
+  }
+
+  private problem({ number, cells }: Row, column: number, say: string, isRefused: boolean): RecordProblem {
+    return { row: number, column: column + 1, cell: excerpt(cells[column] ?? ''), say, isRefused }
+  }
+
+  read(): DailyRecord {
+    const named = nameOf(this.table, this.flowColumn)
+    if (this.options.unit === undefined && !this.unitIsNamed && otherUnit.test(named))
+      this.refuse(
+        this.table.head.at(-1)!,
+        this.flowColumn,
+        `“${excerpt(named)}” names another unit than L/s, m³/s or ft³/s: work the flows over to one of these first, or say which of them it is.`,
+      )
+    const order = this.order?.order === 'm/d/y' ? 'm/d/y' : 'd/m/y'
+    const read = this.table.rows.flatMap((row) => this.readRow(row, order) ?? [])
+    const days = this.order ? this.inOrder(read) : read
+    this.sayHow(days)
+    return {
+      days: this.problems.some(({ isRefused }) => isRefused)
+        ? []
+        : days.map(({ day, flow }) => (day === undefined ? { flow } : { date: isoDate(day), flow })),
+      notes: this.notes,
+      problems: this.problems,
+      reading: this.reading(),
+    }
+  }
+
+  private readRow(row: Row, order: DayOrMonthFirst): Dated | undefined {
+    const cell = row.cells[this.flowColumn] ?? ''
+    const flow = readNumber(cell, this.decimal.mark)
+    const { date } = this.table
+    let day: number | undefined
+    if (date) {
+      const written = dateIn(row, date)
+      day = written && dayOf(written, order)
+      if (day === undefined && (written || flow !== undefined)) {
+        this.refuse(
+          row,
+          date.column,
+          written
+            ? `There is no such day${written.order === 'open' ? `, read as ${order}` : ''}: put the date right.`
+            : 'No date can be read here, so that this flow has no day: write it as year-month-day, or take the row out.',
+        )
+        return undefined
+      }
+    }
+    if (flow === undefined) {
+      this.leaveOut(
+        row,
+        this.flowColumn,
+        cell === '' ? 'No flow: left out as a gap.' : `“${excerpt(cell)}” is no flow: left out as a gap.`,
+      )
+      return undefined
+    }
+    if (flow < 0) {
+      this.refuse(
+        row,
+        this.flowColumn,
+        'A flow below nothing cannot be. If the file marks missing days so, empty the cell: the day is then a gap.',
+      )
+      return undefined
+    }
+    return {
+      row,
+      flow: conversion(
+        'flow',
+        quantities.flow.units.find(({ name }) => name === this.unit)!,
+      )!.toSi(flow),
+      day,
+    }
+  }
+
+  /** By date, one of each; refuses a day with two flows. */
+  private inOrder(read: readonly Dated[]): Dated[] {
+    const isSorted = read.every(({ day }, i) => i === 0 || day! >= read[i - 1]!.day!)
+    if (!isSorted) this.notes.push('The rows do not stand in the order of their dates: they were sorted.')
+    const sorted = isSorted ? read : read.toSorted((a, b) => a.day! - b.day! || a.row.number - b.row.number)
+    const days: Dated[] = []
+    const clashes: [Dated, Dated][] = []
+    let same = 0
+    for (const next of sorted) {
+      const last = days.at(-1)
+      if (last?.day !== next.day) days.push(next)
+      else if (last!.flow === next.flow) same++
+      else clashes.push([last!, next])
+    }
+    const { column } = this.table.date!
+    if (clashes.length > days.length / 2)
+      this.refuse(
+        clashes[0]![1].row,
+        column,
+        'Most dates stand here more than once, with other flows: this is no daily record. Make the mean of each day first.',
+      )
+    else
+      for (const [first, again] of clashes)
+        this.refuse(
+          again.row,
+          column,
+          `${isoDate(again.day!)} stands in row ${first.row.number} with “${first.row.cells[this.flowColumn]!}” and here in row ${again.row.number} with “${again.row.cells[this.flowColumn]!}”: keep one of them.`,
+        )
+    if (same > 0) this.notes.push(`${times(same, 'row')} repeated a date with the same flow: one of each was kept.`)
+    return days
+  }
+
+  private sayHow(days: readonly Dated[]): void {
+    const { table, unit, options, order, decimal, notes } = this
+    if (order?.other && options.dateOrder === undefined)
+      notes.push(
+        `The dates can be read as ${order.order} or ${order.other}: ${order.order} was taken. Choose the other if it is wrong.`,
+      )
+    if (table.numbers.length > 1 && options.flowColumn === undefined)
+      notes.push(
+        `Columns ${list(table.numbers.map((column) => String(column + 1)))} hold numbers: column ${this.flowColumn + 1}${nameOf(table, this.flowColumn) && ` (“${excerpt(nameOf(table, this.flowColumn))}”)`} was taken for the flow.`,
+      )
+    if (decimal.isOpen && options.decimalMark === undefined)
+      notes.push(`“${decimal.mark}” was taken for the decimal mark; it could part the thousands as well.`)
+    if (!this.unitIsNamed && options.unit === undefined && days.length > 0) {
+      const mean = days.reduce((sum, { flow }) => sum + flow, 0) / days.length
+      notes.push(
+        `No unit is named: ${unit} was taken, which makes a mean of ${join(format(mean, 'flow'))}. Choose another if that is not this stream.`,
+      )
+    }
+    if (!order) notes.push('The record has no dates: each row is taken for a day, in the order of the file.')
+    const left = this.problems.filter(({ isRefused }) => !isRefused).length
+    if (left > 0 && !order) notes.push(`${times(left, 'row')} without a flow ${left === 1 ? 'was' : 'were'} left out.`)
+    if (!order) return
+    const { missing, longest, after } = gapsOf(days.map(({ day }) => day!))
+    if (missing > 0)
+      notes.push(
+        `${times(missing, 'day')} between the first and the last ${missing === 1 ? 'has' : 'have'} no flow, ${longest === missing ? '' : `the longest run ${times(longest, 'day')} `}from ${isoDate(after + 1)}: left out, not made up.`,
+      )
+  }
+
+  private reading(): Reading {
+    const { table, flowColumn, unit, unitIsNamed, order, decimal } = this
+    const other = decimal.mark === '.' ? ',' : '.'
+    return {
+      flowColumn: flowColumn + 1,
+      flowColumns: table.numbers.map((column) => ({ column: column + 1, name: nameOf(table, column) })),
+      unit,
+      unitIsNamed,
+      ...(order ? { dateOrder: order.order, ...(order.other ? { otherDateOrder: order.other } : {}) } : {}),
+      decimalMark: decimal.mark,
+      ...(decimal.isOpen ? { otherDecimalMark: other } : {}),
+    }
+  }
+}
 
 /**
- * Reads a text as a record of daily flows. Understood: tab, semicolon, bar, comma or space between cells; decimal comma or point; a heading
- * or none; lines that start with #; dates as y-m-d, d/m/y or m/d/y, with a time or without; flows in L/s, m³/s or ft³/s. Days without a flow
- * and cells that are no number are gaps, told by row and column. Refused, with their rows: a date with two different flows, a flow below
- * zero, dates that are none, and what is no table of flows.
+ * Reads a record of daily flows: columns parted by tabs, semicolons, bars, commas or spaces; with names above or none; comment lines that
+ * start with #; dates (with or without a time) in any of the usual orders, or none at all; decimal point or comma. What the data leave open
+ * is taken one way, told in `notes` and `reading`, and can be chosen by `options` in another reading. Rows that cannot be used are in
+ * `problems`: a flow that is missing leaves a gap; a negative flow, a date that is none, or two flows for one day refuse the record.
  */
-export const readDailyRecord = (text: string, options: RecordOptions = {}): RecordReading => {
-  const refuse = (refused: string, problems: readonly RecordProblem[] = []): RecordReading => ({ refused, problems })
-  const rows = rowsOf(text)
-  const width = Math.max(0, ...rows.slice(0, 200).map(({ cells }) => cells.length))
-  const places = Array.from({ length: width }, (_, i) => i)
-  const body = rows.filter(({ cells }) =>
-    cells.some((cell) => numberIn(cell) !== undefined || dateParts(cell) !== undefined),
-  )
-  if (body.length === 0) return refuse('There is no row with a number here: give a date and a flow in each row.')
-  const share = (column: number, test: (cell: string) => boolean) =>
-    body.slice(0, 300).filter(({ cells }) => test(cells[column] ?? '')).length / Math.min(300, body.length)
-  const dateColumn = most(places, (column) => share(column, (cell) => dateParts(cell) !== undefined))!
-  const hasDates = share(dateColumn, (cell) => dateParts(cell) !== undefined) > 0.5
-  const data = hasDates ? body.filter(({ cells }) => dateParts(cells[dateColumn] ?? '') !== undefined) : body
-  const firstData = data[0]!.number
-  const heading =
-    rows.find(({ number, cells }) => number < firstData && cells.length > 1) ??
-    rows.find(({ number }) => number < firstData)
-  const nameOf = (column: number) => heading?.cells[column]?.trim() || `Column ${column + 1}`
-
-  const numeric = places.filter(
-    (column) => (!hasDates || column !== dateColumn) && share(column, (cell) => numberIn(cell) !== undefined) > 0.5,
-  )
-  if (numeric.length === 0)
-    return refuse('No column holds numbers that could be flows: give a date and a flow in each row.')
-  const varies = (column: number) => new Set(data.slice(0, 300).map(({ cells }) => cells[column])).size
-  const named = numeric.find((column) =>
-    /flow|discharge|debit|débit|abfluss|\bq\b|m3|m³|l\/s|cfs/i.test(nameOf(column)),
-  )
-  const flowColumn =
-    options.flowColumn !== undefined && numeric.includes(options.flowColumn)
-      ? options.flowColumn
-      : (named ?? most(numeric, varies)!)
-
-  const words = heading?.cells.join(' ') ?? ''
-  const told =
-    unitWords.find(([pattern]) => pattern.test(nameOf(flowColumn)))?.[1] ??
-    unitWords.find(([pattern]) => pattern.test(words))?.[1]
-  const unit = options.unit ?? told ?? 'm³/s'
-
-  const order = hasDates ? orderOf(data.map(({ cells }) => dateParts(cells[dateColumn]!)!)) : undefined
-  const dateOrder = options.dateOrder ?? order?.order ?? 'day-first'
-  const problem = ({ number, cells }: Row, column: number, say: string): RecordProblem => ({
-    row: number,
-    column: column + 1,
-    cell: cells[column] ?? '',
-    say,
-  })
-
-  const refusedCells: RecordProblem[] = []
-  const leftOut: RecordProblem[] = []
-  const byTime = new Map<number, { flow: number; row: Row }>()
-  const plain: number[] = []
-  let repeats = 0
-  for (const row of data) {
-    const time = hasDates ? timeOf(dateParts(row.cells[dateColumn]!)!, dateOrder) : undefined
-    if (hasDates && time === undefined) {
-      refusedCells.push(problem(row, dateColumn, 'There is no such day in this order of day and month.'))
-      continue
+export const readDailyRecord = (text: string, options: RecordOptions = {}): DailyRecord => {
+  const table = readTable(text.replace(/^\uFEFF/, ''))
+  if ('say' in table) return { days: [], notes: [], problems: [{ ...table, column: 1, isRefused: true }] }
+  if (table.commasTwice) {
+    const { number, cells } = table.rows[0]!
+    const say =
+      'Commas stand between the columns and in the numbers as well, so that they cannot be told apart: save the file with semicolons or tabs between its columns.'
+    return {
+      days: [],
+      notes: [],
+      problems: [{ row: number, column: 1, cell: excerpt(cells.join(',')), say, isRefused: true }],
     }
-    const cell = row.cells[flowColumn] ?? ''
-    const number = numberIn(cell)
-    if (number === undefined) {
-      leftOut.push(problem(row, flowColumn, cell.trim() === '' ? 'Empty: a gap.' : 'No number: a gap.'))
-      continue
-    }
-    if (number < 0) {
-      refusedCells.push(problem(row, flowColumn, 'A flow is never below zero.'))
-      continue
-    }
-    const flow = number * toSi[unit]
-    if (time === undefined) {
-      plain.push(flow)
-      continue
-    }
-    const before = byTime.get(time)
-    if (before && before.flow !== flow)
-      refusedCells.push(
-        problem(
-          row,
-          flowColumn,
-          `${longDate(time)} has another flow in row ${before.row.number}: give one flow for each day.`,
-        ),
-      )
-    else if (before) repeats++
-    else byTime.set(time, { flow, row })
   }
-  if (refusedCells.length > 0)
-    return refuse(
-      `${counted(refusedCells.length, 'row')} cannot be taken as they stand: mend them, or take them out.`,
-      refusedCells,
-    )
-
-  const times = [...byTime.keys()]
-  const sorted = times.toSorted((a, b) => a - b)
-  const days = hasDates
-    ? sorted.map((time) => ({ date: isoDate(time), flow: byTime.get(time)!.flow }))
-    : plain.map((flow) => ({ flow }))
-  if (days.length === 0) return refuse('No day has a flow that is a number.', leftOut)
-  const [first, last] = [sorted[0]!, sorted.at(-1)!]
-  const missing = hasDates ? Math.round((last - first) / day) + 1 - days.length : 0
-  const isSorted = times.every((time, i) => time === sorted[i])
-  const notes = [
-    hasDates
-      ? `${counted(days.length, 'day')}, ${longDate(first)} to ${longDate(last)}.`
-      : `${counted(days.length, 'flow')} without dates, taken as days one after another.`,
-    ...(missing > 0 ? [`${counted(missing, 'day')} between them ${missing === 1 ? 'has' : 'have'} no flow.`] : []),
-    ...(repeats > 0 ? [`${counted(repeats, 'row')} said the same day and flow again and counted once.`] : []),
-    ...(isSorted ? [] : ['The rows were not in the order of their dates; they are now.']),
-  ]
-  return {
-    record: {
-      days,
-      missing,
-      unit,
-      isUnitGuessed: told === undefined,
-      ...(hasDates && !dateParts(data[0]!.cells[dateColumn]!)!.isYearFirst ? { dateOrder } : {}),
-      isOrderGuessed: order?.isGuessed ?? false,
-      flowColumns: numeric.map((column) => ({ column, name: nameOf(column) })),
-      flowColumn,
-      notes,
-      leftOut,
-    },
-  }
+  return new RecordReader(table, options).read()
 }

@@ -1,7 +1,8 @@
 import type { CalculatorDefinition, Columns, Inputs, PlainRow, PlainValue } from '#calc/index.ts'
 import { fieldText, unitFor } from '#calc/units/format.ts'
-import { columnsOf, isMany, isRecord, pathOf } from './columns.ts'
-import { lineText, startForm, type Form, type Texts } from './form.ts'
+import { columnsOf, isMany, isRecord, pathOf, type ScalarCell } from './columns.ts'
+import { startForm, type Form, type Texts } from './form.ts'
+import { lineText, lineWithUnit } from './line-text.ts'
 
 const written = (value: PlainValue | undefined, cell: Columns[string]): string => {
   if (value === undefined) return ''
@@ -24,8 +25,8 @@ const textsOf = ({ inputs: asked }: CalculatorDefinition, inputs: Inputs): Texts
     }
     if (input.kind === 'runs') {
       for (const [i, run] of ((value ?? []) as readonly (readonly number[])[]).entries()) {
-        const { text, unit } = lineText(input, run)
-        texts[pathOf(input, key, i, '')] = `${text} ${unit}`
+        const cell = columnsOf(input)[''] as ScalarCell
+        texts[pathOf(input, key, i, '')] = lineWithUnit(cell, lineText(cell, run))
       }
       continue
     }

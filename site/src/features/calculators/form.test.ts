@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { calculator } from '#calc/index.ts'
-import { changeForm, shownKeys, solveForm, startForm, unitOf, unitsOf, type Form, type FormAction } from './form.ts'
+import { unitOf, unitsOf } from './field-text.ts'
+import { changeForm, shownKeys, solveForm, startForm, type Form, type FormAction } from './form.ts'
 
 const jet = calculator('jet')
 const penstock = calculator('penstock')

@@ -1,14 +1,9 @@
 import type { CalculatorDefinition, Cell, Input, Inputs, InputValue, PlainRow, PlainValue } from '#calc/index.ts'
 import { CalculationError } from '#calc/errors.ts'
 import { solveDefinition, type Solution } from '#calc/solve-definition.ts'
-import { fieldText } from '#calc/units/format.ts'
-import { parse, type Reading } from '#calc/units/parse.ts'
-import { quantities } from '#calc/units/quantities.ts'
-import { shownUnit } from '#calc/units/system.ts'
 import {
   columnsOf,
   columnsOfRow,
-  capital,
   isList,
   isMany,
   isRecord,
@@ -17,20 +12,14 @@ import {
   type ManyInput,
   type ScalarCell,
 } from './columns.ts'
+import { changeUnit, isBlank, readField, splitUnit, startCell, startText, type FieldText } from './field-text.ts'
+import { changeLineUnit, lineText, readLine, splitLine } from './line-text.ts'
 
 /**
  * What stands in the fields of a calculator, as it was written, and what that means. A field's path is its key, the key and a column's
  * name for a group (`nozzles.diameter`), and the row's number between or behind them for a list (`sections.0.length`, `times.0`).
  */
 
-/** One field as written. Of a choice, `text` is the value. */
-export interface FieldText {
-  text: string
-  /** The unit that a number without one takes. */
-  unit: string
-  /** What was written before the unit was changed: going back brings exactly that back. */
-  written?: { text: string; unit: string }
-}
 export type RowTexts = Readonly<Record<string, FieldText>>
 /** A record that was read from a file or a paste, and what it is. */
 export interface FlowRecord {
@@ -50,79 +39,17 @@ export interface Form {
 /** Texts by path: what a lesson presets, and what an address carries. */
 export type Texts = Readonly<Record<string, string | number | undefined>>
 
-const firstUnit = (cell: ScalarCell): string =>
-  shownUnit(cell.quantity, cell.unit ?? quantities[cell.quantity].units[0]!.name)
-
-const valueOfOne = (cell: ScalarCell, unit: string) => {
-  const one = parse('1', cell.quantity, unit)
-  return one.ok ? one.value : undefined
-}
-
-/** The offered name of a unit that was written another way: l/min is L/min, m3/s is m³/s. */
-const offeredName = (cell: ScalarCell, unit: string): string => {
-  const names = quantities[cell.quantity].units.map(({ name }) => name)
-  if (names.includes(unit)) return unit
-  return names.find((name) => valueOfOne(cell, name) === valueOfOne(cell, unit)) ?? unit
-}
-
-/** The number alone, where a text is a number and its unit. */
-const numberPart = /^\s*([+\-−]?[\d.,\s\u00a0\u202f'’]*\d(?:\s*(?:e|[×x]\s*10\s*\^?)\s*[+\-−]?\d+)?)\s*(?=\D)/i
-
-/** Of "31.4 ± 0.2 m" the unit too; where it does not stand at the end it stays in the text. */
-const splitUncertain = (
-  text: string,
-  cell: ScalarCell,
-  { value, uncertainty, unit }: Extract<Reading, { ok: true }>,
-) => {
-  const alone = text.replace(/(\d|%)\s*[^\d%]*$/, '$1')
-  const again = parse(alone, cell.quantity, unit)
-  const isSame = again.ok && again.value === value && again.uncertainty === uncertainty
-  return { text: isSame ? alone : text, unit: offeredName(cell, unit) }
-}
-
-/** Puts the unit of "9.5 L/s" where the unit is chosen; a text that cannot be read stays as it is. */
-const splitUnit = (text: string, cell: ScalarCell): FieldText => {
-  const unit = firstUnit(cell)
-  const reading = parse(text, cell.quantity, unit)
-  if (!reading.ok) return { text, unit }
-  if (reading.uncertainty !== undefined) return splitUncertain(text, cell, reading)
-  const number = numberPart.exec(text)?.[1]
-  if (number === undefined) return { text, unit }
-  const alone = parse(number, cell.quantity, reading.unit)
-  return alone.ok && alone.value === reading.value
-    ? { text: number, unit: offeredName(cell, reading.unit) }
-    : { text, unit }
-}
-
-/** A number as it was set; in a unit that it was not set in, no longer than it needs to be. */
-const startNumber = (value: number, cell: ScalarCell, unit: string): string => {
-  const text = fieldText(value, cell.quantity, unit)
-  return unit === (cell.unit ?? quantities[cell.quantity].units[0]!.name)
-    ? text
-    : String(Number(Number(text).toPrecision(4)))
-}
-
-const startText = (cell: Cell, initial: PlainValue | undefined): FieldText => {
-  if (cell.kind === 'choice') {
-    const start = initial ?? cell.initial ?? cell.fallback ?? (cell.optional ? '' : cell.of[0]!)
-    return { text: String(start), unit: '' }
-  }
-  const unit = firstUnit(cell)
-  const start = initial ?? cell.initial
-  return { text: typeof start === 'number' ? startNumber(start, cell, unit) : '', unit }
-}
-
-const startCell = (cell: Cell, text: string | number | undefined, initial?: PlainValue): FieldText => {
-  if (text === undefined) return startText(cell, initial)
-  return cell.kind === 'choice' ? { text: String(text), unit: '' } : splitUnit(String(text), cell)
-}
-
 const startRow = (input: ManyInput, key: string, row: number, texts: Texts, initial?: PlainRow): RowTexts =>
   Object.fromEntries(
-    Object.entries(columnsOf(input)).map(([name, cell]) => [
-      name,
-      startCell(cell, texts[pathOf(input, key, row, name)], initial?.[name]),
-    ]),
+    Object.entries(columnsOf(input)).map(([name, cell]) => {
+      const text = texts[pathOf(input, key, row, name)]
+      return [
+        name,
+        input.kind === 'runs'
+          ? splitLine(String(text ?? ''), cell as ScalarCell)
+          : startCell(cell, text, initial?.[name]),
+      ]
+    }),
   )
 
 /** A row with nothing in it, in the units of the one before. */
@@ -137,16 +64,19 @@ export const emptyRow = (input: ListInput, like?: RowTexts): RowTexts =>
     ]),
   )
 
+const blankRows = ({ optional, least }: ListInput): PlainRow[] =>
+  Array.from({ length: optional ? 0 : least }, () => ({}))
+
 const initialRows = (input: ManyInput): readonly PlainRow[] => {
   switch (input.kind) {
     case 'group':
       return [input.initial ?? {}]
     case 'rows':
-      return input.initial ?? Array.from({ length: input.optional ? 0 : input.least }, () => ({}))
+      return input.initial ?? blankRows(input)
     case 'series':
-      return input.initial?.map((value) => ({ '': value })) ?? Array.from({ length: input.least }, () => ({}))
+      return input.initial?.map((value) => ({ '': value })) ?? blankRows(input)
     case 'runs':
-      return Array.from({ length: input.initial?.length ?? input.least }, () => ({}))
+      return input.initial?.map(() => ({})) ?? blankRows(input)
   }
 }
 
@@ -162,19 +92,13 @@ const rowsToldOf = (input: ListInput, key: string, texts: Texts): number | undef
   return texts[key] === '' ? 0 : undefined
 }
 
-/** A run as a line of numbers. */
-export const lineText = (input: Extract<Input, { kind: 'runs' }>, run: readonly number[]): FieldText => {
-  const unit = firstUnit(columnsOf(input)[''] as ScalarCell)
-  return { text: run.map((value) => fieldText(value, input.quantity, unit)).join('  '), unit }
-}
-
 const startRows = (input: ManyInput, key: string, texts: Texts): RowTexts[] => {
   const initial = initialRows(input)
   const told = isList(input) ? rowsToldOf(input, key, texts) : undefined
   return told === undefined
     ? initial.map((row, i) =>
         input.kind === 'runs' && input.initial
-          ? { '': lineText(input, input.initial[i]!) }
+          ? { '': lineText(columnsOf(input)[''] as ScalarCell, input.initial[i]!) }
           : startRow(input, key, i, texts, row),
       )
     : Array.from({ length: told }, (_, i) => startRow(input, key, i, texts))
@@ -203,8 +127,6 @@ export const startForm = ({ inputs }: CalculatorDefinition, texts: Texts = {}, r
 
 const starts = (input: Input): boolean => input.initial !== undefined
 
-const isBlank = (field: FieldText | undefined): boolean => field === undefined || field.text.trim() === ''
-
 /** Whether an input has its place in the form as it stands: not the alternative that is not known, nor what goes with it. */
 export const isShown = (definition: CalculatorDefinition, form: Form, key: string): boolean => {
   const { inputs } = definition
@@ -219,55 +141,6 @@ export const isShown = (definition: CalculatorDefinition, form: Form, key: strin
 
 export const shownKeys = (definition: CalculatorDefinition, form: Form): string[] =>
   Object.keys(definition.inputs).filter((key) => isShown(definition, form, key))
-
-/** What a number field means as it stands. */
-export const readField = (cell: ScalarCell, field: FieldText): Reading => parse(field.text, cell.quantity, field.unit)
-
-/** The unit that a field's number has: one written in the text goes before the one chosen. */
-export const unitOf = (cell: ScalarCell, field: FieldText): string => {
-  const reading = readField(cell, field)
-  return reading.ok ? offeredName(cell, reading.unit) : field.unit
-}
-
-/** The units to choose from, and the one in use where it is another. */
-export const unitsOf = (cell: ScalarCell, field: FieldText): string[] => {
-  const offered = quantities[cell.quantity].units.map(({ name }) => name)
-  const used = unitOf(cell, field)
-  return offered.includes(used) ? offered : [...offered, used]
-}
-
-/** One digit more than was written, and never fewer than four: changing the unit shows the same quantity. */
-const digitsAfterChange = (figures: number): number => Math.max(figures + 1, 4)
-
-/** The ± of a reading, in another unit. */
-const uncertaintyText = (
-  cell: ScalarCell,
-  { value, uncertainty }: Extract<Reading, { ok: true }>,
-  unit: string,
-): string => {
-  if (uncertainty === undefined) return ''
-  const end = (at: number) => Number(fieldText(at, cell.quantity, unit))
-  return ` ± ${Number((end(value + uncertainty) - end(value)).toPrecision(2))}`
-}
-
-/** Another unit for the same quantity: the number is converted. What cannot be read stays as it is. */
-export const changeUnit = (cell: ScalarCell, field: FieldText, unit: string): FieldText => {
-  const written = field.written ?? { text: field.text, unit: unitOf(cell, field) }
-  if (written.unit === unit) return written
-  const reading = readField(cell, written)
-  if (!reading.ok) return { text: field.text, unit }
-  const exact = Number(fieldText(reading.value, cell.quantity, unit))
-  const text = String(Number(exact.toPrecision(digitsAfterChange(reading.figures))))
-  return { text: text + uncertaintyText(cell, reading, unit), unit, written }
-}
-
-/** Each number of a line in another unit. */
-const changeLineUnit = (cell: ScalarCell, field: FieldText, unit: string): FieldText => ({
-  text: lineParts(field.text)
-    .map((text) => changeUnit(cell, { text, unit: field.unit }, unit).text)
-    .join('  '),
-  unit,
-})
 
 export interface FormReading {
   inputs: Inputs
@@ -298,22 +171,6 @@ const readCell = (cell: Cell, field: FieldText): CellReading => {
 /** `sections.0.length` → `sections[0].length`. */
 const fieldOfPath = (path: string): string => path.replace(/\.(\d+)/, '[$1]')
 
-const lineParts = (text: string): string[] => (text.trim() === '' ? [] : text.trim().split(/[;\s]+(?=[+\-−]?[\d.,])/))
-
-/** The numbers of a line, apart by spaces or semicolons; each may have its unit. */
-const readLine = (cell: ScalarCell, row: string, { text, unit }: FieldText): { values: number[]; error?: string } => {
-  const values: number[] = []
-  for (const [i, part] of lineParts(text).entries()) {
-    const reading = parse(part, cell.quantity, unit)
-    const said = `${capital(row)} ${i + 1}, “${part}”`
-    if (!reading.ok) return { values, error: `${said}: ${reading.message}` }
-    if (reading.uncertainty !== undefined)
-      return { values, error: `${said}: leave the ± out; the spread of the ${row}s between the runs tells it.` }
-    values.push(reading.value)
-  }
-  return { values }
-}
-
 /** What the fields say, for `solve`. */
 export const readForm = (definition: CalculatorDefinition, form: Form): FormReading => {
   const inputs: Record<string, InputValue> = {}
@@ -340,7 +197,9 @@ export const readForm = (definition: CalculatorDefinition, form: Form): FormRead
       else if (!input.optional) errors[key] = `${input.label}: choose a file, or paste the record.`
     } else if (input.kind === 'runs') {
       const cell = columnsOf(input)[''] as ScalarCell
-      inputs[key] = form.rows[key]!.map((row, i) => {
+      const rows = form.rows[key]!
+      if (rows.length === 0 && input.optional) continue
+      inputs[key] = rows.map((row, i) => {
         const { values, error } = readLine(cell, input.row, row['']!)
         if (error !== undefined) errors[pathOf(input, key, i, '')] = error
         return values

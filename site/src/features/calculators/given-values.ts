@@ -1,6 +1,7 @@
 import type { CalculatorDefinition, Cell } from '#calc/index.ts'
 import { columnsOfRow, isMany, isRecord, pathOf } from './columns.ts'
-import { shownKeys, type FieldText, type Form } from './form.ts'
+import type { FieldText } from './field-text.ts'
+import { shownKeys, type Form } from './form.ts'
 
 export interface GivenValue {
   label: string
