@@ -110,13 +110,14 @@ export const fillAndVent = defineCalculator({
   },
   solve({ pipeVolume, fillFlow, ventDiameter, allowedVacuum, burstOutflow }) {
     const area = areaOf(ventDiameter)
-    const found = {
+    const found: { fillTime: number; fillAirVelocity: number; ventAirFlow: number; drainTime?: number } = {
       fillTime: pipeVolume / fillFlow,
       fillAirVelocity: fillFlow / area,
       ventAirFlow: dischargeCoefficient * area * airSpeed(allowedVacuum),
     }
     const drainTime = pipeVolume / (burstOutflow ?? 0)
-    return Number.isFinite(drainTime) ? { ...found, drainTime } : found
+    if (Number.isFinite(drainTime)) found.drainTime = drainTime
+    return found
   },
   working(write, { ventDiameter, allowedVacuum }, { drainTime }) {
     const area = { symbol: 'A', value: areaOf(ventDiameter), say: 'the opening of the vent' }

@@ -9,6 +9,10 @@ import { insideDiameter, pipeLength } from './inputs.ts'
 const atmosphere = 101_325
 /** Above this closure parameter the steady rise that Michaud's rule supposes is not what a valve makes. */
 const steadyRiseTo = 2
+/** What every surge has. */
+type Always =
+  'waveSpeed' | 'criticalTime' | 'surgePressure' | 'worstSurge' | 'peakPressure' | 'minimumPressure' | 'rapid'
+
 /** No metal is as soft as this, no plastic as stiff. */
 const softerThanMetal = 2e10
 
@@ -164,7 +168,7 @@ export const surge = defineCalculator({
     const surgePressure = rapid ? worstSurge : (2 * density * length * velocityChange) / closureTime
     const staticHead = staticPressure / (density * g)
     const closureParameter = (waveSpeed * velocityChange) / (2 * g * staticHead)
-    const found = {
+    const found: Record<Always, number> & { closureParameter?: number } = {
       waveSpeed,
       criticalTime,
       surgePressure,
@@ -173,7 +177,8 @@ export const surge = defineCalculator({
       minimumPressure: staticPressure - surgePressure,
       rapid: rapid ? 1 : 0,
     }
-    return Number.isFinite(closureParameter) ? { ...found, closureParameter } : found
+    if (Number.isFinite(closureParameter)) found.closureParameter = closureParameter
+    return found
   },
   working(write, { waterTemperature, staticPressure }, { rapid, closureParameter }) {
     const density = { symbol: '\\rho', value: waterDensity(waterTemperature), say: 'the density of water' }

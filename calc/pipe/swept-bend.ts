@@ -15,9 +15,20 @@ const elbows = [45, 90] as const
 /** Of a fused elbow of the same angle; absent where none is made. */
 const elbowK = (bendAngle: number, f: number): number | undefined => {
   if (bendAngle < elbows[0] || bendAngle > elbows[1]) return undefined
-  const [half, right] = (['elbow-45', 'elbow-90'] as const).map((kind) => fittingK({ kind, joint: 'fused' }, f))
-  return half! + ((right! - half!) * (bendAngle - elbows[0])) / (elbows[1] - elbows[0])
+  const half = fittingK({ kind: 'elbow-45', joint: 'fused' }, f)
+  const right = fittingK({ kind: 'elbow-90', joint: 'fused' }, f)
+  return half + ((right - half) * (bendAngle - elbows[0])) / (elbows[1] - elbows[0])
 }
+
+type Geometry =
+  | 'arcLength'
+  | 'setback'
+  | 'outerFibreStrain'
+  | 'bendRadiusOverOutside'
+  | 'overBendAngle'
+  | 'fillVolume'
+  | 'thinnedWall'
+type Loss = 'headLoss' | 'elbowHeadLoss' | 'saving'
 
 interface Bore {
   outsideDiameter: number
@@ -185,7 +196,7 @@ export const sweptBend = defineCalculator({
       )
     const turn = radians(bendAngle)
     const arcLength = bendRadius * turn
-    const found = {
+    const found: Record<Geometry, number> & Partial<Record<Loss, number>> = {
       arcLength,
       setback: bendRadius * Math.tan(turn / 2),
       outerFibreStrain: outsideDiameter / (2 * bendRadius),
@@ -197,11 +208,12 @@ export const sweptBend = defineCalculator({
     if (flow === undefined) return found
     const head = velocityHead(boreVelocity(flow, bore))
     const f = frictionOf(given)
-    const headLoss = sweptBendK(bendAngle, bendRadius / bore, f) * head
+    found.headLoss = sweptBendK(bendAngle, bendRadius / bore, f) * head
     const elbow = elbowK(bendAngle, f)
-    return elbow === undefined
-      ? { ...found, headLoss }
-      : { ...found, headLoss, elbowHeadLoss: elbow * head, saving: elbow * head - headLoss }
+    if (elbow === undefined) return found
+    found.elbowHeadLoss = elbow * head
+    found.saving = found.elbowHeadLoss - found.headLoss
+    return found
   },
   working(write, given, { headLoss, elbowHeadLoss }) {
     const { bendAngle, bendRadius, flow = 0 } = given
