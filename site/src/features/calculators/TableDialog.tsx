@@ -50,9 +50,7 @@ export function TableDialog({ table: tableId, columns, onChoose, onShut, backTo 
           {choices.map(({ number, row, source, offers }) => (
             <li key={number}>
               <div>
-                <p id={`${id}-${number}`} className="choice-words">
-                  {rowWords(table, row, others)}
-                </p>
+                <p>{rowWords(table, row, others)}</p>
                 {columns.length > 1 && <p className="quiet">{rowWords(table, row, columns)}</p>}
                 {sources.length > 1 && <p className="choice-source">{source}</p>}
               </div>
@@ -60,11 +58,10 @@ export function TableDialog({ table: tableId, columns, onChoose, onShut, backTo 
                 {offers.map(({ words, values }) => (
                   <Button
                     key={words}
-                    id={`${id}-${number}-${words}`}
                     type="button"
                     size="3"
                     variant="outline"
-                    aria-labelledby={`${id}-${number}-${words} ${id}-${number}`}
+                    aria-label={`${words}, ${rowWords(table, row, others)}`}
                     onClick={() => onChoose(values)}
                   >
                     {words}
