@@ -23,6 +23,28 @@ const fileOf = (id: string, width: number, scheme: string) => `${id}-${width}-${
 
 const findings: string[] = []
 
+async function showExample(page: Page, origin: string, { id }: CalculatorDefinition) {
+  await page.emulateMedia({ colorScheme: 'light', reducedMotion: 'reduce' })
+  await page.goto(`${origin}/calculators/${id}`, { waitUntil: 'networkidle' })
+  await page.getByRole('button', { name: 'Try an example' }).click()
+  // The results are there at once; the address and what is said to those who listen follow when the typing stops.
+  await page.waitForTimeout(1000)
+  await page.evaluate(() => document.fonts.ready)
+}
+
+async function lookOver(page: Page, definition: CalculatorDefinition): Promise<string[]> {
+  const { title, invalid, wide } = await page.evaluate(() => ({
+    title: document.querySelector('h1')?.textContent ?? '',
+    invalid: [...document.querySelectorAll('[aria-invalid="true"]')].map(({ id }) => id),
+    wide: document.documentElement.scrollWidth - window.innerWidth,
+  }))
+  return [
+    ...(title === definition.title ? [] : [`the heading is “${title}”`]),
+    ...(invalid.length === 0 ? [] : [`the example is complained of at ${invalid.join(', ')}`]),
+    ...(wide <= 0 ? [] : [`${wide} px wider than the window`]),
+  ]
+}
+
 async function takePictures(page: Page, origin: string, width: number, definition: CalculatorDefinition) {
   const found = new Set<string>()
   const listeners = {
@@ -30,23 +52,17 @@ async function takePictures(page: Page, origin: string, width: number, definitio
     console: (message: { type(): string; text(): string }) => message.type() === 'error' && found.add(message.text()),
   }
   page.on('pageerror', listeners.pageerror).on('console', listeners.console)
-  await page.emulateMedia({ colorScheme: 'light', reducedMotion: 'reduce' })
-  await page.goto(`${origin}/calculators/${definition.id}`, { waitUntil: 'networkidle' })
-  await page.getByRole('button', { name: 'Try an example' }).click()
-  await page.waitForURL(/\?/)
-  await page.evaluate(() => document.fonts.ready)
-  for (const scheme of schemes) {
-    await page.emulateMedia({ colorScheme: scheme, reducedMotion: 'reduce' })
-    await page.screenshot({ path: path.join(folder, fileOf(definition.id, width, scheme)), fullPage: true })
+  try {
+    await showExample(page, origin, definition)
+    for (const scheme of schemes) {
+      await page.emulateMedia({ colorScheme: scheme, reducedMotion: 'reduce' })
+      await page.screenshot({ path: path.join(folder, fileOf(definition.id, width, scheme)), fullPage: true })
+    }
+    for (const finding of await lookOver(page, definition)) found.add(finding)
+  } catch (error) {
+    // One page that does not come must not keep the others from their pictures.
+    found.add(String(error))
   }
-  const { title, invalid, wide } = await page.evaluate(() => ({
-    title: document.querySelector('h1')?.textContent ?? '',
-    invalid: [...document.querySelectorAll('[aria-invalid="true"]')].map(({ id }) => id),
-    wide: document.documentElement.scrollWidth - window.innerWidth,
-  }))
-  if (title !== definition.title) found.add(`the heading is “${title}”`)
-  if (invalid.length > 0) found.add(`the example is complained of at ${invalid.join(', ')}`)
-  if (wide > 0) found.add(`${wide} px wider than the window`)
   page.off('pageerror', listeners.pageerror).off('console', listeners.console)
   for (const finding of found) findings.push(`${definition.id} at ${width} px: ${finding}`)
 }
