@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react'
 import { MathSymbol } from './Formula.tsx'
+import { PlusMinus } from './PlusMinus.tsx'
 import './quantity-field.css'
 
 interface FieldFrameProps {
@@ -21,6 +22,8 @@ export interface QuantityFieldProps extends FieldFrameProps {
   units: readonly string[]
   /** Numbers only, for the keys that a phone shows. */
   negative?: boolean
+  /** It may be written with ±. */
+  uncertain?: boolean
   onText: (text: string) => void
   onUnit: (unit: string) => void
 }
@@ -68,7 +71,16 @@ function FieldFrame({ id, label, symbol, help, error, after, children }: FieldFr
 export const unitWords = (unit: string) => (unit === '' ? 'of 1' : unit)
 
 /** A number with its unit, kept as it is written. The unit can be chosen, or written behind the number. */
-export function QuantityField({ text, unit, units, negative, onText, onUnit, ...frame }: QuantityFieldProps) {
+export function QuantityField({
+  text,
+  unit,
+  units,
+  negative,
+  uncertain,
+  onText,
+  onUnit,
+  ...frame
+}: QuantityFieldProps) {
   const { id, label, error } = frame
   const hasUnit = units.length > 1 || units[0] !== ''
   return (
@@ -84,6 +96,7 @@ export function QuantityField({ text, unit, units, negative, onText, onUnit, ...
           aria-invalid={error ? true : undefined}
           aria-describedby={describedBy(frame)}
         />
+        {uncertain && <PlusMinus fieldId={id} text={text} onText={onText} />}
         {units.length > 1 ? (
           <select
             value={unit}

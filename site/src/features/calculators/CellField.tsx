@@ -53,6 +53,7 @@ export function CellField({ idOf, path, cell, field, error, change, after }: Cel
       unit={unitOf(cell, field)}
       units={unitsOf(cell, field)}
       negative={cell.range[0] < 0}
+      uncertain={!cell.whole}
       onText={(text) => change({ do: 'write', path, text })}
       onUnit={(unit) => change({ do: 'change-unit', path, cell, unit })}
     />

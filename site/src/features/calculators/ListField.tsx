@@ -22,13 +22,6 @@ export interface ManyProps<I extends ManyInput = ManyInput> {
 
 const article = (word: string) => (/^[aeiou]/.test(word) ? 'an' : 'a')
 
-/** Cells that come and go with the kind of row, or very many, stand better below each other. */
-const widestTable = 5
-const isTable = (input: ListInput) => {
-  const cells = Object.values(columnsOf(input))
-  return cells.length <= widestTable && cells.every(({ when }) => when === undefined)
-}
-
 export function ManyFrame({ path, input, errors, idOf, after, children }: ManyProps & { children: ReactNode }) {
   return (
     <fieldset className="field-list" id={idOf(path)}>
@@ -57,7 +50,11 @@ export function ListField(props: ManyProps<ListInput>) {
   const isFull = rows.length >= input.most
   const names = Object.keys(columnsOf(input))
   const fieldId = (row: number, name: string) => idOf(pathOf(input, path, row, name))
-  const goTo = (id: string) => document.getElementById(id)?.focus()
+  const goTo = (id: string): boolean => {
+    const field = document.getElementById(id)
+    field?.focus()
+    return field !== null
+  }
 
   const add = (name = names[0]!) => {
     flushSync(() => change({ do: 'add-row', key: path }))
@@ -82,30 +79,13 @@ export function ListField(props: ManyProps<ListInput>) {
     const by = event.key === 'Enter' || event.key === 'ArrowDown' ? 1 : event.key === 'ArrowUp' ? -1 : 0
     if (by === 0 || event.target instanceof HTMLSelectElement) return
     if (row + by === rows.length && event.key === 'Enter' && !isFull) add(name)
-    else goTo(fieldId(row + by, name))
+    else if (!goTo(fieldId(row + by, name))) goTo(fieldId(row + by, names[0]!))
     event.preventDefault()
   }
-  const moves = { onPaste: paste, onMove: move }
 
   return (
     <ManyFrame {...props}>
-      {isTable(input) ? (
-        <RowTable {...props} rows={rows} {...moves} mayLose={mayLose} onRemove={remove} />
-      ) : (
-        rows.map((row, i) => (
-          <fieldset className="row" key={i}>
-            <legend>
-              {capital(word)} {i + 1}
-            </legend>
-            <RowFields {...props} row={row} number={i} onPaste={paste} />
-            {mayLose && (
-              <button type="button" className="plain-button no-print" onClick={() => remove(i)}>
-                Take out {word} {i + 1}
-              </button>
-            )}
-          </fieldset>
-        ))
-      )}
+      <RowTable {...props} rows={rows} onPaste={paste} onMove={move} mayLose={mayLose} onRemove={remove} />
       <div className="list-actions no-print">
         <Button type="button" id={addId} variant="outline" size="3" onClick={() => add()} disabled={isFull}>
           Add {article(word)} {word}
@@ -136,11 +116,11 @@ export function ListField(props: ManyProps<ListInput>) {
 }
 
 export function ManyField(props: ManyProps) {
-  const { input, form, path } = props
+  const { input } = props
   if (isList(input)) return <ListField {...props} input={input} />
   return (
     <ManyFrame {...props}>
-      <RowFields {...props} row={form.rows[path]![0]!} number={0} />
+      <RowFields {...props} input={input} />
     </ManyFrame>
   )
 }

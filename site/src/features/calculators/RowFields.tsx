@@ -1,21 +1,16 @@
-import { useState, type ClipboardEvent } from 'react'
+import { useState } from 'react'
+import type { Input } from '#calc/index.ts'
 import { CellField } from './CellField.tsx'
 import { columnsOfRow, pathOf } from './columns.ts'
-import type { RowTexts } from './form.ts'
 import type { ManyProps } from './ListField.tsx'
 import { Picker } from './Picker.tsx'
 
-interface RowFieldsProps extends ManyProps {
-  row: RowTexts
-  number: number
-  onPaste?: (event: ClipboardEvent, row: number, column: string) => void
-}
-
-/** One row's fields; those that may stay empty and do step back where they are more than one. */
-export function RowFields({ input, path, row, number, errors, idOf, change, onPaste }: RowFieldsProps) {
+/** The fields of a group; those that may stay empty and do step back where they are more than one. */
+export function RowFields({ form, input, path, errors, idOf, change }: ManyProps<Extract<Input, { kind: 'group' }>>) {
   const [asked, setAsked] = useState(false)
+  const row = form.rows[path]![0]!
   const columns = columnsOfRow(input, row)
-  const pathOfCell = (name: string) => pathOf(input, path, number, name)
+  const pathOfCell = (name: string) => pathOf(input, path, 0, name)
   const names = Object.keys(columns)
   const isWanted = (name: string) =>
     !columns[name]!.optional || row[name]!.text !== '' || errors[pathOfCell(name)] !== undefined
@@ -26,7 +21,7 @@ export function RowFields({ input, path, row, number, errors, idOf, change, onPa
       {names
         .filter((name) => asked || !stepsBack || isWanted(name))
         .map((name) => (
-          <div key={name} onPaste={onPaste && ((event) => onPaste(event, number, name))} className="row-field">
+          <div key={name} className="row-field">
             <CellField
               idOf={idOf}
               path={pathOfCell(name)}

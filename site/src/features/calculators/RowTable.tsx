@@ -2,12 +2,14 @@ import { useState, type ClipboardEvent, type KeyboardEvent, type ReactNode } fro
 import type { Cell } from '#calc/index.ts'
 import { MathSymbol } from '../../components/Formula.tsx'
 import { unitWords } from '../../components/QuantityField.tsx'
-import { choiceOptions, helpOf } from './CellField.tsx'
-import { capital, columnsOf, pathOf, rowWord, type ListInput } from './columns.ts'
-import { unitOf, unitsOf } from './field-text.ts'
+import { helpOf } from './CellField.tsx'
+import { capital, columnsOf, columnsOfRow, pathOf, rowWord, type ListInput, type ScalarCell } from './columns.ts'
+import { readField, unitOf, unitsOf, type FieldText } from './field-text.ts'
 import type { RowTexts } from './form.ts'
+import { unitOfLine } from './line-text.ts'
 import type { ManyProps } from './ListField.tsx'
 import { Picker } from './Picker.tsx'
+import { TableCell } from './TableCell.tsx'
 
 interface RowTableProps extends ManyProps<ListInput> {
   rows: readonly RowTexts[]
@@ -17,31 +19,64 @@ interface RowTableProps extends ManyProps<ListInput> {
   onMove: (event: KeyboardEvent, row: number, column: string) => void
 }
 
-/** A list as a table: a unit for each column, a row for each item; below each other where there is no room beside. */
-export function RowTable({
-  path,
-  input,
-  rows,
-  errors,
-  idOf,
-  change,
-  mayLose,
-  onRemove,
-  onPaste,
-  onMove,
-}: RowTableProps) {
+/** A cell that says something: not empty, nor what empty counts as. */
+const says = (cell: Cell, field: FieldText): boolean => {
+  if (field.text.trim() === '') return false
+  if (cell.kind === 'choice') return field.text !== cell.fallback
+  const reading = readField(cell, field)
+  return !reading.ok || reading.value !== cell.fallback
+}
+
+/**
+ * A list as a table: a unit for each column, a row for each item; below each other where there is no room beside. Cells that come and go with
+ * the kind of row share one column.
+ */
+export function RowTable(props: RowTableProps) {
+  const { path, input, rows, errors, idOf, change, mayLose, onRemove, onPaste, onMove } = props
   const [asked, setAsked] = useState(false)
   const columns = Object.entries(columnsOf(input))
   const word = rowWord(input)
-  const isUsed = (name: string) =>
-    rows.some((row, i) => row[name]!.text !== '' || errors[pathOf(input, path, i, name)] !== undefined)
-  const spare = columns.filter(([name, { optional }]) => optional && !isUsed(name))
-  const shown = asked ? columns : columns.filter((column) => !spare.includes(column))
+  const isLine = input.kind === 'runs'
+  const isUsed = ([name, cell]: [string, Cell]) =>
+    !cell.optional ||
+    rows.some((row, i) => says(cell, row[name]!) || errors[pathOf(input, path, i, name)] !== undefined)
+  // What was there once stays, so that no field goes away while it is written in.
+  const [seen, setSeen] = useState<readonly string[]>([])
+  const used = columns.filter(isUsed).map(([name]) => name)
+  if (used.some((name) => !seen.includes(name))) setSeen([...new Set([...seen, ...used])])
+  const always = columns.filter(([, { when }]) => when === undefined)
+  const spare = always.filter(([name]) => !seen.includes(name) && !used.includes(name))
+  const shown = asked ? always : always.filter((column) => !spare.includes(column))
+  const details = columns.filter(([, { when }]) => when !== undefined)
   const first = rows[0]
   /** The row that was last in hand: a figure from a table goes there. */
   const [inHand, setInHand] = useState(0)
   const target = Math.min(inHand, rows.length - 1)
+  const unitIn = (cell: ScalarCell, field: FieldText) => (isLine ? unitOfLine(cell, field) : unitOf(cell, field))
 
+  const cellAt = (row: RowTexts, i: number, name: string, cell: Cell, isDetail = false) => {
+    const at = pathOf(input, path, i, name)
+    const field = row[name]!
+    const unit = cell.kind === 'scalar' ? unitIn(cell, field) : ''
+    return (
+      <TableCell
+        id={idOf(at)}
+        cell={cell}
+        field={field}
+        isWrong={errors[at] !== undefined}
+        unit={unit}
+        isOwn={isDetail || (cell.kind === 'scalar' && first !== undefined && unit !== unitIn(cell, first[name]!))}
+        isLine={isLine}
+        onText={(text) => change({ do: 'write', path: at, text })}
+        onFocus={() => setInHand(i)}
+        onPaste={(event) => onPaste(event, i, name)}
+        onKeyDown={(event) => onMove(event, i, name)}
+      />
+    )
+  }
+  const ofRow = (i: number) => <span className="out-of-sight">, {`${word} ${i + 1}`}</span>
+
+  if (!first) return null
   return (
     <>
       <table className={columns.length > 1 ? 'row-table' : 'row-table row-table-one'}>
@@ -52,17 +87,15 @@ export function RowTable({
             </th>
             {shown.map(([name, cell]) => (
               <th key={name} scope="col">
-                {cell.label}{' '}
-                {cell.symbol && (
-                  <span className="field-symbol" aria-hidden="true">
-                    <MathSymbol tex={cell.symbol} />
-                  </span>
+                {cell.label} <CellSymbol cell={cell} />
+                {cell.kind === 'scalar' && (
+                  <ColumnUnit {...{ cell, name, path, change }} unit={unitIn(cell, first[name]!)} />
                 )}
-                {cell.kind === 'scalar' && first && <ColumnUnit {...{ cell, first, name, path, change }} />}
               </th>
             ))}
+            {details.length > 0 && <th scope="col">Details</th>}
             {mayLose && (
-              <th scope="col">
+              <th scope="col" className="no-print">
                 <span className="out-of-sight">Take out</span>
               </th>
             )}
@@ -70,65 +103,41 @@ export function RowTable({
         </thead>
         <tbody>
           {rows.map((row, i) => {
-            const wrong = shown.flatMap(([name]) => {
+            const own = Object.entries(columnsOfRow(input, row)).filter(([, { when }]) => when !== undefined)
+            const wrong = [...shown, ...own].flatMap(([name]) => {
               const at = pathOf(input, path, i, name)
               return errors[at] === undefined ? [] : [{ at, message: errors[at] }]
             })
             return (
-              <RowOf key={i} wrong={wrong} idOf={idOf} width={shown.length + 2}>
+              <RowOf key={i} wrong={wrong} idOf={idOf} width={shown.length + 3}>
                 <th scope="row">
                   <span className="row-word">{capital(word)} </span>
                   {i + 1}
                 </th>
-                {shown.map(([name, cell]) => {
-                  const at = pathOf(input, path, i, name)
-                  const field = row[name]!
-                  const common = {
-                    id: idOf(at),
-                    'aria-invalid': errors[at] ? true : undefined,
-                    'aria-describedby': errors[at] ? `${idOf(at)}-error` : undefined,
-                    onFocus: () => setInHand(i),
-                    onPaste: (event: ClipboardEvent) => onPaste(event, i, name),
-                    onKeyDown: (event: KeyboardEvent) => onMove(event, i, name),
-                  } as const
-                  const isOwn = cell.kind === 'scalar' && first && unitOf(cell, field) !== unitOf(cell, first[name]!)
-                  return (
-                    <td key={name} className={errors[at] ? 'quantity-wrong' : undefined}>
-                      <label htmlFor={idOf(at)}>
-                        {name === '' ? `${capital(word)} ${i + 1}` : cell.label}
-                        <span className="out-of-sight">{name === '' ? '' : `, ${word} ${i + 1}`}</span>
-                      </label>
-                      <span className="cell">
-                        {cell.kind === 'choice' ? (
-                          <select
-                            {...common}
-                            value={field.text}
-                            onChange={(event) => change({ do: 'write', path: at, text: event.target.value })}
-                          >
-                            {choiceOptions(cell).map(({ value, words }) => (
-                              <option key={value} value={value}>
-                                {words}
-                              </option>
-                            ))}
-                          </select>
-                        ) : (
-                          <input
-                            {...common}
-                            value={field.text}
-                            size={1}
-                            inputMode={cell.range[0] < 0 || input.kind === 'runs' ? 'text' : 'decimal'}
-                            autoComplete="off"
-                            spellCheck={false}
-                            onChange={(event) => change({ do: 'write', path: at, text: event.target.value })}
-                          />
-                        )}
-                        {cell.kind === 'scalar' && unitOf(cell, field) !== '' && (
-                          <span className={isOwn ? 'cell-unit cell-unit-own' : 'cell-unit'}>{unitOf(cell, field)}</span>
-                        )}
-                      </span>
-                    </td>
-                  )
-                })}
+                {shown.map(([name, cell]) => (
+                  <td key={name}>
+                    <label htmlFor={idOf(pathOf(input, path, i, name))}>
+                      {name === '' ? `${capital(word)} ${i + 1}` : cell.label}
+                      {name !== '' && ofRow(i)}
+                    </label>
+                    {cellAt(row, i, name, cell)}
+                  </td>
+                ))}
+                {details.length > 0 && (
+                  <td className="details">
+                    <div>
+                      {own.map(([name, cell]) => (
+                        <span key={name} className="detail">
+                          <label htmlFor={idOf(pathOf(input, path, i, name))}>
+                            {cell.label} <CellSymbol cell={cell} />
+                            {ofRow(i)}
+                          </label>
+                          {cellAt(row, i, name, cell, true)}
+                        </span>
+                      ))}
+                    </div>
+                  </td>
+                )}
                 {mayLose && (
                   <td className="no-print">
                     <button
@@ -137,7 +146,8 @@ export function RowTable({
                       aria-label={`Take out ${word} ${i + 1}`}
                       onClick={() => onRemove(i)}
                     >
-                      Take out
+                      <span className="take-out-sign">×</span>
+                      <span className="take-out-words">Take out</span>
                     </button>
                   </td>
                 )}
@@ -146,19 +156,21 @@ export function RowTable({
           })}
         </tbody>
       </table>
-      {input.kind === 'rows' &&
-        target >= 0 &&
-        shown.map(([name]) => (
-          <Picker
-            key={name}
-            cells={input.columns}
-            name={name}
-            pathOf={(other) => pathOf(input, path, target, other)}
-            change={change}
-            words={`${input.columns[name]!.label} from a table, for ${word} ${target + 1}`}
-          />
-        ))}
-      <ColumnHelp cells={shown.map(([, cell]) => cell)} />
+      {input.kind === 'rows' && (
+        <div className="row-pickers">
+          {shown.map(([name]) => (
+            <Picker
+              key={name}
+              cells={input.columns}
+              name={name}
+              pathOf={(other) => pathOf(input, path, target, other)}
+              change={change}
+              words={`${input.columns[name]!.label} from a table, for ${word} ${target + 1}`}
+            />
+          ))}
+        </div>
+      )}
+      <ColumnHelp cells={[...shown, ...details].map(([, cell]) => cell)} />
       {(asked || spare.length > 0) && (
         <button type="button" className="plain-button no-print" aria-expanded={asked} onClick={() => setAsked(!asked)}>
           {asked ? 'Only what is needed' : `More columns (${spare.length})`}
@@ -168,16 +180,23 @@ export function RowTable({
   )
 }
 
+function CellSymbol({ cell }: { cell: Cell }) {
+  return cell.symbol === undefined ? null : (
+    <span className="field-symbol" aria-hidden="true">
+      <MathSymbol tex={cell.symbol} />
+    </span>
+  )
+}
+
 interface ColumnUnitProps extends Pick<RowTableProps, 'path' | 'change'> {
-  cell: Extract<Cell, { kind: 'scalar' }>
-  first: RowTexts
+  cell: ScalarCell
   name: string
+  unit: string
 }
 
 /** The unit of a whole column; a cell may still be written in its own. */
-function ColumnUnit({ cell, first, name, path, change }: ColumnUnitProps) {
-  const units = unitsOf(cell, first[name]!)
-  const unit = unitOf(cell, first[name]!)
+function ColumnUnit({ cell, name, path, change, unit }: ColumnUnitProps) {
+  const units = unitsOf(cell, { text: '', unit })
   if (units.length === 1) return units[0] === '' ? null : <span className="column-unit">{units[0]}</span>
   return (
     <select
