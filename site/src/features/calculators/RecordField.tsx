@@ -1,7 +1,9 @@
 import { Button } from '@radix-ui/themes'
 import { useId, useState, type DragEvent, type ReactNode } from 'react'
 import type { RecordInput } from './columns.ts'
-import type { DailyRecord, DateOrder, FlowUnit, RecordOptions, RecordProblem, RecordReading } from './daily-record.ts'
+import type { DailyRecord, FlowUnit, Reading, RecordOptions, RecordProblem } from './daily-record.ts'
+import type { DayOrMonthFirst } from './daily-record-dates.ts'
+import type { DecimalMark } from './daily-record-numbers.ts'
 import type { FlowRecord, FormAction } from './form.ts'
 import './record-field.css'
 import { SparkLine } from './SparkLine.tsx'
@@ -20,7 +22,7 @@ interface Source {
   name: string
   text: string
   options: RecordOptions
-  reading: RecordReading
+  read: DailyRecord
 }
 
 /** The list of cells stays short enough to be read. */
@@ -52,10 +54,10 @@ export function RecordField({ idOf, path, input, record, error, change, after }:
     setFailed(undefined)
     try {
       const { readDailyRecord } = await import('./daily-record.ts')
-      const reading = readDailyRecord(text, options)
-      setSource({ name, text, options, reading })
-      if ('record' in reading) {
-        const values = reading.record.days.map(({ flow }) => flow)
+      const read = readDailyRecord(text, options)
+      setSource({ name, text, options, read })
+      if (read.days.length > 0) {
+        const values = read.days.map(({ flow }) => flow)
         if (values.length > input.most) setFailed(`There are more than ${input.most} days: take a part of the record.`)
         else change({ do: 'take-record', key: path, record: { values, from: name } })
       }
@@ -80,7 +82,9 @@ export function RecordField({ idOf, path, input, record, error, change, after }:
   const again = (options: RecordOptions) => {
     if (source) void read(source.name, source.text, { ...source.options, ...options })
   }
-  const reading = source?.reading
+  const taken = source?.read
+  const refused = taken?.problems.filter(({ isRefused }) => isRefused) ?? []
+  const gaps = taken?.problems.filter(({ isRefused }) => !isRefused) ?? []
 
   return (
     <fieldset className="field-list record-field" id={idOf(path)}>
@@ -133,13 +137,29 @@ export function RecordField({ idOf, path, input, record, error, change, after }:
         </details>
       </div>
       <div role="status">
-        {reading && 'refused' in reading && (
-          <>
-            <p className="field-error">{reading.refused} The record before stands.</p>
-            <Problems problems={reading.problems} />
-          </>
+        {taken && taken.days.length === 0 && (
+          <p className="field-error">
+            {refused.length > 0 ? 'It cannot be taken as it stands:' : 'It holds no day with a flow.'} The record before
+            stays.
+          </p>
         )}
-        {reading && 'record' in reading && <Understood record={reading.record} again={again} />}
+        <Problems problems={refused} />
+        {taken && taken.notes.length > 0 && (
+          <ul className="record-notes">
+            {taken.notes.map((note) => (
+              <li key={note}>{note}</li>
+            ))}
+          </ul>
+        )}
+        {taken?.reading && <Choices reading={taken.reading} again={again} />}
+        {gaps.length > 0 && (
+          <details>
+            <summary>
+              {gaps.length === 1 ? 'One cell holds' : `${gaps.length} cells hold`} no flow: those days are gaps
+            </summary>
+            <Problems problems={gaps} />
+          </details>
+        )}
         {failed && <p className="field-error">{failed}</p>}
         {error && <p className="field-error">{error}</p>}
       </div>
@@ -163,65 +183,65 @@ export function RecordField({ idOf, path, input, record, error, change, after }:
 }
 
 const units: readonly FlowUnit[] = ['L/s', 'm³/s', 'ft³/s']
-const orders: readonly { value: DateOrder; words: string }[] = [
-  { value: 'day-first', words: 'day, then month' },
-  { value: 'month-first', words: 'month, then day' },
-]
+const orderWords: Readonly<Record<DayOrMonthFirst, string>> = {
+  'd/m/y': 'day, then month',
+  'm/d/y': 'month, then day',
+}
+const markWords: Readonly<Record<DecimalMark, string>> = { '.': 'a point', ',': 'a comma' }
 
-/** What was understood of a record, and what only its owner knows. */
-function Understood({ record, again }: { record: DailyRecord; again: (options: RecordOptions) => void }) {
+/** What a record leaves open, to be said by its owner. */
+function Choices({ reading, again }: { reading: Reading; again: (options: RecordOptions) => void }) {
+  const { unit, unitIsNamed, dateOrder, otherDateOrder, flowColumn, flowColumns, decimalMark, otherDecimalMark } =
+    reading
   return (
-    <>
-      <ul className="record-notes">
-        {record.notes.map((note) => (
-          <li key={note}>{note}</li>
-        ))}
-      </ul>
-      <div className="record-choices no-print">
+    <div className="record-choices no-print">
+      <label>
+        Flows are in{' '}
+        <select value={unit} onChange={(event) => again({ unit: event.target.value as FlowUnit })}>
+          {units.map((unit) => (
+            <option key={unit}>{unit}</option>
+          ))}
+        </select>
+        {!unitIsNamed && <span className="field-help"> the file does not say</span>}
+      </label>
+      {otherDateOrder && dateOrder && dateOrder !== 'y-m-d' && (
         <label>
-          Flows are in{' '}
-          <select value={record.unit} onChange={(event) => again({ unit: event.target.value as FlowUnit })}>
-            {units.map((unit) => (
-              <option key={unit}>{unit}</option>
+          Dates are{' '}
+          <select value={dateOrder} onChange={(event) => again({ dateOrder: event.target.value as DayOrMonthFirst })}>
+            {[dateOrder, otherDateOrder].map((order) => (
+              <option key={order} value={order}>
+                {orderWords[order]}
+              </option>
             ))}
           </select>
-          {record.isUnitGuessed && <span className="field-help"> the file does not say</span>}
+          <span className="field-help"> both would do</span>
         </label>
-        {record.dateOrder && (
-          <label>
-            Dates are{' '}
-            <select
-              value={record.dateOrder}
-              onChange={(event) => again({ dateOrder: event.target.value as DateOrder })}
-            >
-              {orders.map(({ value, words }) => (
-                <option key={value} value={value}>
-                  {words}
-                </option>
-              ))}
-            </select>
-            {record.isOrderGuessed && <span className="field-help"> both would do</span>}
-          </label>
-        )}
-        {record.flowColumns.length > 1 && (
-          <label>
-            The flow is in{' '}
-            <select value={record.flowColumn} onChange={(event) => again({ flowColumn: Number(event.target.value) })}>
-              {record.flowColumns.map(({ column, name }) => (
-                <option key={column} value={column}>
-                  {name}
-                </option>
-              ))}
-            </select>
-          </label>
-        )}
-      </div>
-      {record.leftOut.length > 0 && (
-        <details>
-          <summary>{record.leftOut.length} cells hold no flow: those days are gaps</summary>
-          <Problems problems={record.leftOut} />
-        </details>
       )}
-    </>
+      {otherDecimalMark && (
+        <label>
+          Decimals stand behind{' '}
+          <select value={decimalMark} onChange={(event) => again({ decimalMark: event.target.value as DecimalMark })}>
+            {[decimalMark, otherDecimalMark].map((mark) => (
+              <option key={mark} value={mark}>
+                {markWords[mark]}
+              </option>
+            ))}
+          </select>
+          <span className="field-help"> both would do</span>
+        </label>
+      )}
+      {flowColumns.length > 1 && (
+        <label>
+          The flow is in{' '}
+          <select value={flowColumn} onChange={(event) => again({ flowColumn: Number(event.target.value) })}>
+            {flowColumns.map(({ column, name }) => (
+              <option key={column} value={column}>
+                {name || `column ${column}`}
+              </option>
+            ))}
+          </select>
+        </label>
+      )}
+    </div>
   )
 }
