@@ -87,22 +87,29 @@ const times = (count: number, one: string, many = `${one}s`): string => `${count
 const list = (items: readonly string[]): string =>
   items.length < 2 ? items.join('') : `${items.slice(0, -1).join(', ')} and ${items.at(-1)!}`
 
+/** Formats of columns that some archives write below their names: 14n, 20d. */
+const columnFormat = /^\d+[a-z]$/i
+
 const nameOf = ({ head }: Table, column: number): string => {
-  const names = head.map(({ cells }) => cells[column] ?? '').filter((name) => /\p{L}/u.test(name))
+  const names = head
+    .map(({ cells }) => cells[column] ?? '')
+    .filter((name) => /\p{L}/u.test(name) && !columnFormat.test(name))
   return names.find((name) => flowWords.test(name)) ?? names.at(-1) ?? ''
 }
 
-/** The column whose name speaks of flow, else the first of numbers that is no mere count of the rows. */
+/** Whether a column's numbers are no readings: all the same, as a station's number, or counting the rows. */
+const isLabel = ({ rows }: Table, column: number): boolean => {
+  const step = (i: number) => Number(rows[i]!.cells[column]) - Number(rows[i - 1]!.cells[column])
+  return rows.length > 2 && [0, 1].some((wanted) => rows.every((_, i) => i === 0 || step(i) === wanted))
+}
+
+/** The column whose name speaks of flow, else the first of readings behind the date, else the first. */
 const likeliestFlow = (table: Table): number => {
-  const { numbers, rows } = table
-  const counts = (column: number) =>
-    rows.length > 2 &&
-    rows.every(({ cells }, i) => i === 0 || Number(cells[column]) - Number(rows[i - 1]!.cells[column]) === 1)
-  return (
-    numbers.find((column) => flowWords.test(nameOf(table, column))) ??
-    numbers.find((column) => !counts(column)) ??
-    numbers[0]!
-  )
+  const { numbers, date } = table
+  const named = numbers.find((column) => flowWords.test(nameOf(table, column)))
+  if (named !== undefined) return named
+  const readings = numbers.filter((column) => !isLabel(table, column))
+  return readings.find((column) => column > (date?.column ?? -1)) ?? readings[0] ?? numbers[0]!
 }
 
 interface Dated {
