@@ -194,15 +194,18 @@ describe('POST /api/calculators/solve', () => {
 })
 
 describe('the body of a calculation', () => {
-  it('may hold ten years of daily flows to every digit; what is larger is told', async () => {
-    const flows = (count: number) => Array.from({ length: count }, (_, i) => 0.1 + i / 7e5)
-    const read = await solve('flow-by-bucket', { volume: 0.02, times: flows(40_000) }).expect(422)
-    expect(read.body).toMatchObject({ code: 'out-of-range', fields: [{ field: 'times' }] })
-    const refused = await solve('flow-by-bucket', { volume: 0.02, times: flows(400_000) }).expect(413)
+  it('may hold a record of 40 000 daily flows to every digit; what is larger is told', async () => {
+    const record = (days: number) => ({ dailyFlows: Array.from({ length: days }, (_, i) => 0.1 + (i % 997) / 7e5) })
+    const long = record(40_000)
+    const { body } = await solve('flow-duration', long).expect(200)
+    expect(body).toEqual(JSON.parse(JSON.stringify(solveByLibrary('flow-duration', long))))
+    const tooMany = await solve('flow-duration', record(40_001)).expect(422)
+    expect(tooMany.body).toMatchObject({ code: 'out-of-range', fields: [{ field: 'dailyFlows' }] })
+    const refused = await solve('flow-duration', record(400_000)).expect(413)
     expect(refused.body).toMatchObject({ code: 'too-large' })
     // Other routes keep to what they need.
-    const body = { email: 'a'.repeat(300_000), password: 'b' }
-    await test.caller().post('/api/auth/session').send(body).expect(413)
+    const tooLong = { email: 'a'.repeat(300_000), password: 'b' }
+    await test.caller().post('/api/auth/session').send(tooLong).expect(413)
   })
 })
 
