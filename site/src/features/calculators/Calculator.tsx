@@ -21,7 +21,16 @@ import { useUnits } from '../../lib/unit-preference.ts'
 import { searchOf } from './address.ts'
 import './calculators.css'
 import { CopyLink } from './CopyLink.tsx'
-import { changeForm, solveForm, startForm, type Form, type FormAction, type Solved, type Texts } from './form.ts'
+import {
+  changeForm,
+  recordsTaken,
+  solveForm,
+  startForm,
+  type Form,
+  type FormAction,
+  type Solved,
+  type Texts,
+} from './form.ts'
 import { givenValues } from './given-values.ts'
 import { InputFields } from './InputFields.tsx'
 import { loadDrawing } from './load-drawing.ts'
@@ -148,7 +157,10 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
           <UntilReady>
             <InputFields definition={definition} form={form} errors={errors} cautions={cautions} change={change} />
             <div className="calculator-actions no-print">
-              <CopyLink path={() => `/calculators/${id}${searchOf(definition, form)}`} />
+              <CopyLink
+                path={() => `/calculators/${id}${searchOf(definition, form)}`}
+                leavesOut={recordsTaken(definition, form)}
+              />
               <Button type="button" size="3" variant="outline" onClick={() => put(startForm(definition, preset))}>
                 Start again
               </Button>

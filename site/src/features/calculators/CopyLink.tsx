@@ -3,7 +3,7 @@ import { CopyNote } from '../../components/CopyNote.tsx'
 import { useCopy } from '../../components/use-copy.ts'
 
 /** Copies the address that carries these inputs; where the browser forbids copying, it is shown to be copied by hand. */
-export function CopyLink({ path }: { path: () => string }) {
+export function CopyLink({ path, leavesOut }: { path: () => string; leavesOut: readonly string[] }) {
   const { copied, copy } = useCopy()
   return (
     <>
@@ -17,10 +17,15 @@ export function CopyLink({ path }: { path: () => string }) {
       </Button>
       <CopyNote
         copied={copied}
-        done="The link is copied. It carries these inputs."
+        done={leavesOut.length === 0 ? 'The link is copied. It carries these inputs.' : 'The link is copied.'}
         byHand="Copy this address:"
         label="Address with these inputs"
       />
+      {leavesOut.length > 0 && (
+        <p className="copy-note">
+          A link does not carry the {leavesOut.join(' and ')}: a record is too long for one. All else it does.
+        </p>
+      )}
     </>
   )
 }

@@ -45,11 +45,22 @@ function Alternative({ definition, pair, known, name, change }: AlternativeProps
   )
 }
 
+const nbsp = '\u00a0'
+
 const manyOptional = 3
 
 /** Optional inputs step back only where they are many. */
 const isSpare = (input: Input) =>
   input.optional === true && input.initial === undefined && input.goesWith === undefined && input.or === undefined
+
+const mayBeUncertain = ({ inputs }: CalculatorDefinition) =>
+  Object.values(inputs).some((input) =>
+    input.kind === 'scalar'
+      ? !input.whole
+      : input.kind === 'series'
+        ? !input.long
+        : 'columns' in input && Object.values(input.columns).some((cell) => cell.kind === 'scalar' && !cell.whole),
+  )
 
 /** All fields of a calculator, in the order of its definition. */
 export function InputFields({ definition, form, errors, cautions, change }: FieldsProps) {
@@ -109,6 +120,12 @@ export function InputFields({ definition, form, errors, cautions, change }: Fiel
           <summary>More, where you know it ({spare.length})</summary>
           {spare.map(fieldOf)}
         </details>
+      )}
+      {mayBeUncertain(definition) && (
+        <p className="field-help no-print">
+          A number may have a ±, one standard uncertainty: 31.4{nbsp}±{nbsp}0.2{nbsp}m, or 31.4{nbsp}m{nbsp}±{nbsp}2
+          {nbsp}%.
+        </p>
       )}
     </>
   )

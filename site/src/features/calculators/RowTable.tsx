@@ -104,9 +104,11 @@ export function RowTable(props: RowTableProps) {
         <tbody>
           {rows.map((row, i) => {
             const own = Object.entries(columnsOfRow(input, row)).filter(([, { when }]) => when !== undefined)
-            const wrong = [...shown, ...own].flatMap(([name]) => {
+            const wrong = [...shown, ...own].flatMap(([name, { label }]) => {
               const at = pathOf(input, path, i, name)
-              return errors[at] === undefined ? [] : [{ at, message: errors[at] }]
+              const message = errors[at]
+              if (message === undefined) return []
+              return [{ at, message: name === '' || message.startsWith(label) ? message : `${label}: ${message}` }]
             })
             return (
               <RowOf key={i} wrong={wrong} idOf={idOf} width={shown.length + 3}>

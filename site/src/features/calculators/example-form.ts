@@ -1,7 +1,7 @@
 import type { CalculatorDefinition, Columns, Inputs, PlainRow, PlainValue } from '#calc/index.ts'
 import { fieldText, unitFor } from '#calc/units/format.ts'
 import { columnsOf, isMany, isRecord, pathOf, type ScalarCell } from './columns.ts'
-import { startForm, type Form, type Texts } from './form.ts'
+import { inventedRecord, startForm, type Form, type Texts } from './form.ts'
 import { lineText, lineWithUnit } from './line-text.ts'
 
 const written = (value: PlainValue | undefined, cell: Columns[string]): string => {
@@ -46,7 +46,7 @@ export const exampleForm = (definition: CalculatorDefinition): Form => {
   const { inputs } = definition.example
   const records = Object.entries(definition.inputs).flatMap(([key, input]) =>
     isRecord(input) && inputs[key] !== undefined
-      ? [[key, { values: inputs[key] as readonly number[], from: 'An invented record' }] as const]
+      ? [[key, { values: inputs[key] as readonly number[], from: inventedRecord }] as const]
       : [],
   )
   return startForm(definition, textsOf(definition, inputs), Object.fromEntries(records))

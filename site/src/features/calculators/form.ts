@@ -27,6 +27,8 @@ export interface FlowRecord {
   /** "An invented year", or the file's name. */
   from: string
 }
+/** What the definition starts with is called. */
+export const inventedRecord = 'An invented year'
 export interface Form {
   fields: Readonly<Record<string, FieldText>>
   /** What was taken as a whole: years of flows, SI. */
@@ -112,7 +114,7 @@ export const startForm = ({ inputs }: CalculatorDefinition, texts: Texts = {}, r
   const known: string[] = []
   const isGiven = (key: string) => Object.keys(texts).some((path) => path === key || path.startsWith(`${key}.`))
   for (const [key, input] of Object.entries(inputs)) {
-    if (isRecord(input)) taken[key] = records[key] ?? { values: input.initial ?? [], from: 'An invented record' }
+    if (isRecord(input)) taken[key] = records[key] ?? { values: input.initial ?? [], from: inventedRecord }
     else if (isMany(input)) rows[key] = startRows(input, key, texts)
     else fields[key] = startCell(input, texts[key])
 
@@ -124,6 +126,13 @@ export const startForm = ({ inputs }: CalculatorDefinition, texts: Texts = {}, r
   }
   return { fields, rows, records: taken, known: [...new Set(known)] }
 }
+
+/** The labels of the records that are others than the form starts with: no address carries them. */
+export const recordsTaken = ({ inputs }: CalculatorDefinition, { records }: Form): string[] =>
+  Object.entries(records).flatMap(([key, { values }]) => {
+    const input = inputs[key]!
+    return isRecord(input) && values !== input.initial ? [input.label.toLowerCase()] : []
+  })
 
 const starts = (input: Input): boolean => input.initial !== undefined
 
