@@ -22,7 +22,8 @@ const yearLast = /^(\d{1,2})([-/. ])(\d{1,2})\2(\d{4}|\d{2})$/
 const compact = /^(1[6-9]\d\d|2[01]\d\d)(\d\d)(\d\d)$/
 const named = /^(\d{1,2})[-/. ]+([a-z]{3,9})\.?[-/., ]+(\d{4}|\d{2})$/i
 const nameFirst = /^([a-z]{3,9})\.?[- ]+(\d{1,2})[-, ]+(\d{4})$/i
-const timeOfDay = /[T, ]\s*\d{1,2}:\d{2}.*$/i
+/** Nothing but a time may stand behind a date: with more, columns were not parted. */
+const timeOfDay = /[T, ]\s*\d{1,2}:\d{2}(:\d{2}(\.\d+)?)?\s*([ap]\.?m\.?|z|utc|gmt|[+-]\d{2}:?\d{2})?$/i
 
 /** A date as written, its time of day left away; undefined where the text is none. */
 export const readDate = (text: string): WrittenDate | undefined => {

@@ -70,10 +70,10 @@ export interface DailyRecord {
 }
 
 const unitSpellings: Record<FlowUnit, RegExp> = {
-  'ft³/s': /ft\s?(3|³|\^3)\s?(\/|per )\s?s|\bcfs\b|\bcusecs?\b|cubic (foot|feet)( per |\/)s/i,
+  'ft³/s': /ft\s?(3|³|\^3)\s?(\/|per )\s?s|(?<![a-z])(cfs|cusecs?)(?![a-z])|cubic (foot|feet)( per |\/)s/i,
   'm³/s':
-    /m\s?(3|³|\^3|\*\*3)\s?(\/|per )\s?s|m(3|³|\^3)[ .·]?s\^?(-1|⁻¹)|\bcumecs?\b|\bcms\b|cubic met(re|er)s?( per |\/)s/i,
-  'L/s': /\bl\s?\/\s?s|\bl[ .·]?s\^?(-1|⁻¹)|\blps\b|lit(re|er)s?( per |\/)s/i,
+    /m\s?(3|³|\^3|\*\*3)\s?(\/|per )\s?s|m(3|³|\^3)[ .·]?s\^?(-1|⁻¹)|(?<![a-z])(cumecs?|cms)(?![a-z])|cubic met(re|er)s?( per |\/)s/i,
+  'L/s': /(?<![a-z])(l\s?\/\s?s(ec)?|l[ .·]?s\^?(-1|⁻¹)|lps)(?![a-z])|lit(re|er)s?( per |\/)s/i,
 }
 /** Other things that daily figures are given in. */
 const otherUnit =
@@ -82,7 +82,7 @@ const flowWords = /flow|discharge|débit|debit|abfluss|durchfluss|caudal|portata
 
 const unitsIn = (text: string): FlowUnit[] => flowUnits.filter((unit) => unitSpellings[unit].test(text))
 
-const times = (count: number, one: string, many = `${one}s`): string => `${count} ${count === 1 ? one : many}`
+const times = (count: number, one: string): string => `${count} ${one}${count === 1 ? '' : 's'}`
 
 const list = (items: readonly string[]): string =>
   items.length < 2 ? items.join('') : `${items.slice(0, -1).join(', ')} and ${items.at(-1)!}`
