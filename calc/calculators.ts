@@ -1,7 +1,10 @@
 import type { CalculatorDefinition } from './definition.ts'
 import { alternator } from './electrical/alternator.ts'
+import { beltDrive } from './jet/belt-drive.ts'
 import { jet } from './jet/jet.ts'
 import { runner } from './jet/runner.ts'
+import { settlingBasin } from './leat/settling-basin.ts'
+import { spillway } from './leat/spillway.ts'
 import { collapse } from './pipe/collapse.ts'
 import { fillAndVent } from './pipe/fill-and-vent.ts'
 import { fittings } from './pipe/fittings.ts'
@@ -16,12 +19,23 @@ import { surge } from './pipe/surge.ts'
 import { sweptBend } from './pipe/swept-bend.ts'
 import { thrust } from './pipe/thrust.ts'
 import { flowByBucket } from './site/flow-by-bucket.ts'
+import { flowByFloat } from './site/flow-by-float.ts'
+import { flowByRectangularWeir } from './site/flow-by-rectangular-weir.ts'
+import { flowBySalt } from './site/flow-by-salt.ts'
+import { flowByVNotch } from './site/flow-by-v-notch.ts'
 import { headByGauge } from './site/head-by-gauge.ts'
+import { headByLevels } from './site/head-by-levels.ts'
 import { annualEnergy } from './water/annual-energy.ts'
 import { energyValue } from './water/energy-value.ts'
 import { flowDuration } from './water/flow-duration.ts'
 import { loadDay } from './water/load-day.ts'
 import { power } from './water/power.ts'
+import { cable } from './electrical/cable.ts'
+import { cableChoice } from './electrical/cable-choice.ts'
+import { dumpLoad } from './electrical/dump-load.ts'
+import { openChannel } from './leat/open-channel.ts'
+import { screen } from './leat/screen.ts'
+import { submergence } from './leat/submergence.ts'
 import { water } from './water/water.ts'
 
 /** Every calculator by its id, in the order of the water. */
@@ -32,8 +46,18 @@ export const calculators = {
   'annual-energy': annualEnergy,
   'energy-value': energyValue,
   'load-day': loadDay,
+  'head-by-levels': headByLevels,
   'head-by-gauge': headByGauge,
   'flow-by-bucket': flowByBucket,
+  'flow-by-v-notch': flowByVNotch,
+  'flow-by-rectangular-weir': flowByRectangularWeir,
+  'flow-by-float': flowByFloat,
+  'flow-by-salt': flowBySalt,
+  'open-channel': openChannel,
+  screen,
+  submergence,
+  'settling-basin': settlingBasin,
+  spillway,
   friction,
   fittings,
   penstock,
@@ -49,7 +73,11 @@ export const calculators = {
   'pipe-movement': pipeMovement,
   jet,
   runner,
+  'belt-drive': beltDrive,
   alternator,
+  cable,
+  'cable-choice': cableChoice,
+  'dump-load': dumpLoad,
 } as const satisfies Record<string, CalculatorDefinition>
 
 export type CalculatorId = keyof typeof calculators

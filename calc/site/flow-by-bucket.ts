@@ -1,10 +1,5 @@
 import { defineCalculator } from '../definition.ts'
-
-const mean = (values: readonly number[]): number => values.reduce((sum, value) => sum + value, 0) / values.length
-
-/** Standard uncertainty of the mean of repeated readings: JCGM 100:2008, 4.2.3. */
-const uncertaintyOfMean = (values: readonly number[], middle: number): number =>
-  Math.sqrt(values.reduce((sum, value) => sum + (value - middle) ** 2, 0) / (values.length - 1) / values.length)
+import { mean, uncertaintyOfMean } from '../numeric/mean.ts'
 
 /**
  * A small stream led into a vessel and timed: flow Q = V/t̄, with the standard uncertainty of the timings (type A) joined with the volume's.
