@@ -42,7 +42,14 @@ export async function compareWithServer(
   cases: readonly string[],
 ): Promise<Fault[]> {
   const { id } = definition
-  const expected = (json: string) => byLibrary(definition, JSON.parse(json))
+  const expected = (json: string): Answer => {
+    try {
+      return byLibrary(definition, JSON.parse(json))
+    } catch {
+      // Told already where the library was asked; nothing that the server says can be right.
+      return { error: { field: '', code: 'thrown', message: 'The library throws.' } }
+    }
+  }
   const faults: Fault[] = []
   const note = (json: string, fault: string | undefined) => fault && faults.push({ fault, json })
 

@@ -1,4 +1,4 @@
-import { Body, Controller, Get, Param, Post } from '@nestjs/common'
+import { Body, Controller, Get, Param, Post, StreamableFile } from '@nestjs/common'
 import { ApiParam, ApiTags } from '@nestjs/swagger'
 import { z } from 'zod'
 import { calculators } from '#calc/index.ts'
@@ -48,7 +48,7 @@ export class CalculatorsController {
   @Post('solve')
   @Answers(solutions)
   solveAll(@Body({ schema: batch }) { items }: SolveBatch) {
-    return this.service.solveAll(items)
+    return new StreamableFile(this.service.solveAll(items), { type: 'application/json; charset=utf-8' })
   }
 
   @Get(':id')

@@ -1,5 +1,7 @@
+import { Readable } from 'node:stream'
 import { setImmediate } from 'node:timers/promises'
-import { Injectable } from '@nestjs/common'
+import { Injectable, Logger } from '@nestjs/common'
+import type { z } from 'zod'
 import {
   CalculationError,
   calculator,
@@ -10,16 +12,18 @@ import {
 } from '#calc/index.ts'
 import type { ErrorBody } from '../common/dto/error.schema.ts'
 import { fieldsOf } from '../common/pipes/request-validation.pipe.ts'
-import { Refusal } from '../common/refusal.ts'
-import { solveItemSchema, type Trouble } from './dto/calculator.schema.ts'
+import { broken, Refusal } from '../common/refusal.ts'
+import { solutionSchema, solveItemSchema, type Trouble } from './dto/calculator.schema.ts'
 
-type SolvedItem = Solution | { error: Trouble }
+type SolvedItem = z.infer<typeof solutionSchema> | { error: Trouble }
 
 /** How much one request may ask for: the answers keep everybody else waiting. */
 export const greatest = { items: 1000, numbers: 100_000 }
 
 @Injectable()
 export class CalculatorsService {
+  private readonly logger = new Logger('Calculators')
+
   list(): CalculatorDefinition[] {
     return Object.values<CalculatorDefinition>(calculators)
   }
@@ -44,20 +48,25 @@ export class CalculatorsService {
     }
   }
 
-  async solveAll(items: readonly unknown[]): Promise<{ results: SolvedItem[] }> {
+  /** The answer piece by piece, as JSON: a thousand workings in one text would keep everybody else waiting while it is made. */
+  solveAll(items: readonly unknown[]): Readable {
     if (items.length > greatest.items) {
       throw new Refusal('too-large', `Send at most ${greatest.items} items in one go.`)
     }
     if (items.reduce((sum: number, item) => sum + sizeOf(item), 0) > greatest.numbers) {
       throw new Refusal('too-large', `Send at most ${greatest.numbers} numbers in one go, all items together.`)
     }
-    const results: SolvedItem[] = []
-    for (const item of items) {
-      results.push(this.solveItem(item))
+    return Readable.from(this.resultsOf(items), { objectMode: false })
+  }
+
+  private async *resultsOf(items: readonly unknown[]) {
+    yield '{"results":['
+    for (const [i, item] of items.entries()) {
+      yield (i === 0 ? '' : ',') + JSON.stringify(this.solveItem(item))
       // Whoever else waits is answered between two items.
       await setImmediate()
     }
-    return { results }
+    yield ']}'
   }
 
   private solveItem(raw: unknown): SolvedItem {
@@ -65,10 +74,11 @@ export class CalculatorsService {
     if (!item.success) return { error: fieldsOf(item.error.issues[0]!)[0]! }
     const { id, inputs } = item.data
     try {
-      return this.solve(id, inputs)
+      return solutionSchema.parse(this.solve(id, inputs))
     } catch (error) {
-      if (!(error instanceof Refusal)) throw error
-      const { code, message, fields } = error.getResponse() as ErrorBody
+      if (!(error instanceof Refusal)) this.logger.error(error instanceof Error ? error.stack : error)
+      const refusal = error instanceof Refusal ? error : broken()
+      const { code, message, fields } = refusal.getResponse() as ErrorBody
       return { error: fields[0] ?? { field: 'id', code, message } }
     }
   }

@@ -36,3 +36,6 @@ export class Refusal extends HttpException {
 }
 
 export const notSignedIn = () => new Refusal('not-signed-in', 'Sign in first.')
+
+export const broken = () =>
+  new Refusal('broken', 'Something broke on our side; it has been noted. Try again in a while.')

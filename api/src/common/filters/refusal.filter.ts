@@ -1,6 +1,6 @@
 import { type ArgumentsHost, Catch, type ExceptionFilter, HttpException, Logger } from '@nestjs/common'
 import type { Response } from 'express'
-import { Refusal } from '../refusal.ts'
+import { broken, Refusal } from '../refusal.ts'
 
 /** Gives every error, ours or the framework's, the one shape; what is nobody's doing but ours is written to the log only. */
 @Catch()
@@ -27,6 +27,6 @@ export class RefusalFilter implements ExceptionFilter {
       return new Refusal('malformed', 'The request could not be read: send JSON.')
     }
     this.logger.error(error instanceof Error ? error.stack : error)
-    return new Refusal('broken', 'Something broke on our side; it has been noted. Try again in a while.')
+    return broken()
   }
 }
