@@ -81,7 +81,7 @@ export function InputFields({ definition, form, errors, cautions, change }: Fiel
     let field: ReactNode
     if (isRecord(input))
       field = <RecordField {...common} input={input} record={form.records[key]!} error={errors[key]} after={after} />
-    else if (isMany(input)) field = <ManyField {...common} {...{ definition, form, input, errors, after }} />
+    else if (isMany(input)) field = <ManyField {...common} {...{ form, input, errors, after }} />
     else
       field = (
         <CellField

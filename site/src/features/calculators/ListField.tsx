@@ -1,7 +1,6 @@
 import { Button } from '@radix-ui/themes'
 import { useState, type ClipboardEvent, type KeyboardEvent, type ReactNode } from 'react'
 import { flushSync } from 'react-dom'
-import type { CalculatorDefinition } from '#calc/index.ts'
 import { capital, columnsOf, isList, pathOf, rowWord, type ListInput, type ManyInput } from './columns.ts'
 import { type Form, type FormAction, type RowTexts } from './form.ts'
 import './list-field.css'
@@ -10,7 +9,6 @@ import { RowFields } from './RowFields.tsx'
 import { RowTable } from './RowTable.tsx'
 
 export interface ManyProps<I extends ManyInput = ManyInput> {
-  definition: CalculatorDefinition
   form: Form
   path: string
   input: I
@@ -41,7 +39,7 @@ interface Note {
 
 /** A list of rows: written, pasted from a spreadsheet, taken out and put back. */
 export function ListField(props: ManyProps<ListInput>) {
-  const { definition, form, path, input, idOf, change } = props
+  const { form, path, input, idOf, change } = props
   const rows = form.rows[path]!
   const [note, setNote] = useState<Note>()
   const word = rowWord(input)
@@ -69,7 +67,7 @@ export function ListField(props: ManyProps<ListInput>) {
     goTo(addId)
   }
   const paste = (event: ClipboardEvent, row: number, column: string) => {
-    const pasted = pasteBlock(definition, form, input, { key: path, row, column }, event.clipboardData.getData('text'))
+    const pasted = pasteBlock(form, input, { key: path, row, column }, event.clipboardData.getData('text'))
     if (!pasted) return
     event.preventDefault()
     setNote({ say: pasted.say, before: rows })

@@ -4,7 +4,7 @@ import type { RecordInput } from './columns.ts'
 import type { DailyRecord, FlowUnit, Reading, RecordOptions, RecordProblem } from './daily-record.ts'
 import type { DayOrMonthFirst } from './daily-record-dates.ts'
 import type { DecimalMark } from './daily-record-numbers.ts'
-import type { FlowRecord, FormAction } from './form.ts'
+import { inventedRecord, type FlowRecord, type FormAction } from './form.ts'
 import './record-field.css'
 import { SparkLine } from './SparkLine.tsx'
 
@@ -23,6 +23,8 @@ interface Source {
   text: string
   options: RecordOptions
   read: DailyRecord
+  /** What was taken of it. */
+  record?: FlowRecord
 }
 
 /** The list of cells stays short enough to be read. */
@@ -55,12 +57,12 @@ export function RecordField({ idOf, path, input, record, error, change, after }:
     try {
       const { readDailyRecord } = await import('./daily-record.ts')
       const read = readDailyRecord(text, options)
-      setSource({ name, text, options, read })
-      if (read.days.length > 0) {
-        const values = read.days.map(({ flow }) => flow)
-        if (values.length > input.most) setFailed(`There are more than ${input.most} days: take a part of the record.`)
-        else change({ do: 'take-record', key: path, record: { values, from: name } })
-      }
+      const values = read.days.map(({ flow }) => flow)
+      const isTooLong = values.length > input.most
+      const record = values.length > 0 && !isTooLong ? { values, from: name } : undefined
+      setSource({ name, text, options, read, record })
+      if (isTooLong) setFailed(`There are more than ${input.most} days: take a part of the record.`)
+      if (record) change({ do: 'take-record', key: path, record })
     } catch {
       setFailed('The file could not be read here. Try again, or paste its text.')
     }
@@ -82,7 +84,8 @@ export function RecordField({ idOf, path, input, record, error, change, after }:
   const again = (options: RecordOptions) => {
     if (source) void read(source.name, source.text, { ...source.options, ...options })
   }
-  const taken = source?.read
+  // Of a record that is no longer there, because the form started again, nothing more is said.
+  const taken = source && (source.record === undefined || source.record === record) ? source.read : undefined
   const refused = taken?.problems.filter(({ isRefused }) => isRefused) ?? []
   const gaps = taken?.problems.filter(({ isRefused }) => !isRefused) ?? []
 
@@ -163,7 +166,7 @@ export function RecordField({ idOf, path, input, record, error, change, after }:
         {failed && <p className="field-error">{failed}</p>}
         {error && <p className="field-error">{error}</p>}
       </div>
-      {source && input.initial && (
+      {input.initial && record.values !== input.initial && (
         <Button
           type="button"
           variant="outline"
@@ -171,10 +174,10 @@ export function RecordField({ idOf, path, input, record, error, change, after }:
           className="no-print"
           onClick={() => {
             setSource(undefined)
-            change({ do: 'take-record', key: path, record: { values: input.initial!, from: 'An invented record' } })
+            change({ do: 'take-record', key: path, record: { values: input.initial!, from: inventedRecord } })
           }}
         >
-          Back to the invented record
+          Back to the invented year
         </Button>
       )}
       {after}

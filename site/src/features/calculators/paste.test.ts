@@ -9,7 +9,7 @@ import { blockOf, pasteBlock } from './paste.ts'
 
 const pasted = (definition: CalculatorDefinition, key: string, text: string, row = 0, column = '') => {
   const form = startForm(definition)
-  const block = pasteBlock(definition, form, definition.inputs[key] as ListInput, { key, row, column }, text)
+  const block = pasteBlock(form, definition.inputs[key] as ListInput, { key, row, column }, text)
   if (!block) return undefined
   const next = { ...form, rows: { ...form.rows, [key]: block.rows } }
   return { say: block.say, value: readForm(definition, next).inputs[key], errors: readForm(definition, next).errors }
@@ -84,4 +84,51 @@ test('what does not fit is told, and nothing else is lost', () => {
 
 test('one cell is left to the field itself', () => {
   expect(pasted(flowByBucket, 'times', '8.4')).toBeUndefined()
+})
+
+test('a comma with a space behind parts cells, one without may be the decimal one', () => {
+  expect(blockOf('8.1, 8.4, 8.2', 2)).toEqual([['8.1', '8.4', '8.2']])
+  expect(blockOf('8,1, 8,4', 2)).toEqual([['8,1', '8,4']])
+})
+
+test('one line goes down a list of one column', () => {
+  expect(pasted(flowByBucket, 'times', '8.1\t8.4\t8.2')?.value).toEqual(expect.arrayContaining([8.1, 8.4, 8.2]))
+})
+
+test('a heading is told of, its unit is that of the cells, and a choice is none', () => {
+  const { say, value } = pasted(penstock, 'sections', 'Length (ft)\tBore, in\n100\t4', 0, 'length')!
+  expect(say).toBe('Pasted: 1 section. The first line was taken for a heading.')
+  expect(value).toMatchObject([{ length: 30.48, insideDiameter: 0.1016 }])
+  expect(
+    pasted(fittings, 'fittings', 'gate valve, open\nball valve of full bore, open', 0, 'kind')?.value,
+  ).toMatchObject([{ kind: 'gate-valve' }, { kind: 'ball-valve' }, {}, {}])
+})
+
+test('a block of runs is a run in each column, one line is one run', () => {
+  const levels = {
+    ...flowByBucket,
+    inputs: {
+      rises: {
+        kind: 'runs',
+        label: 'Rises',
+        run: 'run',
+        row: 'rise',
+        quantity: 'length',
+        unit: 'm',
+        range: [0, 10],
+        least: 1,
+        most: 3,
+        leastEach: 1,
+        mostEach: 50,
+      },
+    },
+  } as unknown as CalculatorDefinition
+  expect(pasted(levels, 'rises', 'first\tsecond\n1,42\t1,40\n1,38\t1,39\n\t0,5')).toMatchObject({
+    say: 'Pasted: 2 runs of up to 3 rises. The first line was taken for a heading.',
+    value: [
+      [1.42, 1.38],
+      [1.4, 1.39, 0.5],
+    ],
+  })
+  expect(pasted(levels, 'rises', '1.42\t1.38\t0.96 m')?.value).toEqual([[1.42, 1.38, 0.96]])
 })
