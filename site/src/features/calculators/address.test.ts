@@ -39,6 +39,13 @@ describe('inputs in an address', () => {
     expect(throughAddress(jet, chosen).fields['flow']).toEqual({ text: '570', unit: 'L/min' })
   })
 
+  it('keep a ±, with its unit', () => {
+    const jet = calculator('jet')
+    const form = startForm(jet, { netHead: '31.4 ± 0.2 m', flow: '9.5 L/s ± 2 %' })
+    expect(textsOf(jet, form)).toMatchObject({ netHead: '31.4 ± 0.2 m', flow: '9.5 L/s ± 2 %' })
+    expect(throughAddress(jet, form).fields).toEqual(form.fields)
+  })
+
   it('keep what cannot be read, and what was emptied', () => {
     const jet = calculator('jet')
     const wrong = changeForm(jet, startForm(jet), { do: 'write', path: 'flow', text: 'much & more' })

@@ -1,7 +1,17 @@
 import { describe, expect, it } from 'vitest'
 import { calculator } from '#calc/index.ts'
+import { uncertaintyOf } from '#calc/uncertainty.ts'
 import { unitOf, unitsOf } from './field-text.ts'
-import { changeForm, shownKeys, solveForm, startForm, type Form, type FormAction } from './form.ts'
+import {
+  changeForm,
+  readForm,
+  recordsTaken,
+  shownKeys,
+  solveForm,
+  startForm,
+  type Form,
+  type FormAction,
+} from './form.ts'
 
 const jet = calculator('jet')
 const penstock = calculator('penstock')
@@ -164,4 +174,91 @@ describe('rows', () => {
     expect(solveForm(fittings, valve).solution).toBeDefined()
     expect(valve.rows['fittings']![0]!['bendAngle']!.text).toBe('45')
   })
+})
+
+describe('±', () => {
+  const write = (path: string, text: string): FormAction => ({ do: 'write', path, text })
+  const uncertaintiesOf = (definition: typeof jet, form: Form) => {
+    const attempt = solveForm(definition, form)
+    return attempt.solution && attempt.uncertainties
+  }
+
+  it('is one standard uncertainty, by the name of its field', () => {
+    const form = after(
+      penstock,
+      startForm(penstock),
+      write('grossHead', '48 ± 0.2'),
+      write('sections.0.length', '240 m ± 1 %'),
+    )
+    const uncertainties = uncertaintiesOf(penstock, form)!
+    expect(Object.keys(uncertainties).sort()).toEqual(['grossHead', 'sections[0].length'])
+    expect(uncertainties['grossHead']).toBeCloseTo(0.2, 12)
+    expect(uncertainties['sections[0].length']).toBeCloseTo(2.4, 12)
+    expect(
+      uncertaintyOf(penstock, readForm(penstock, form).inputs, uncertainties).outputs['netHead']!.value,
+    ).toBeGreaterThan(40)
+  })
+
+  it('belongs to a number of a series as well', () => {
+    const bucket = calculator('flow-by-bucket')
+    const form = after(bucket, startForm(bucket), write('times.1', '8,4 +/- 0,3'))
+    expect(uncertaintiesOf(bucket, form)).toEqual({ 'times[1]': expect.closeTo(0.3, 12) })
+  })
+
+  it('turns with the number into another unit, and back into what was written', () => {
+    const change = (unit: string): FormAction => ({ do: 'change-unit', path: 'netHead', cell: netHead, unit })
+    const form = after(jet, startForm(jet, { netHead: '31.4 ± 0.2 m' }))
+    expect(form.fields['netHead']).toEqual({ text: '31.4 ± 0.2', unit: 'm' })
+    const feet = after(jet, form, change('ft'))
+    expect(feet.fields['netHead']).toMatchObject({ text: '103 ± 0.66', unit: 'ft' })
+    expect(after(jet, feet, change('m')).fields['netHead']!.text).toBe('31.4 ± 0.2')
+  })
+
+  it('is refused where things are counted', () => {
+    const form = after(fittings, startForm(fittings), write('fittings.1.count', '2 ± 1'))
+    expect(errorsOf(fittings, form)).toEqual({ 'fittings.1.count': expect.stringContaining('counted') })
+  })
+})
+
+describe('a record of years', () => {
+  const duration = calculator('flow-duration')
+  const values = Array.from({ length: 730 }, (_, i) => 0.01 + i / 1e5)
+
+  it('is taken as a whole, and is named where it is another than at the start', () => {
+    const form = startForm(duration)
+    expect(form.records['dailyFlows']).toMatchObject({ from: 'An invented year' })
+    expect(recordsTaken(duration, form)).toEqual([])
+    const taken = after(duration, form, { do: 'take-record', key: 'dailyFlows', record: { values, from: 'weir.csv' } })
+    expect(readForm(duration, taken).inputs['dailyFlows']).toBe(values)
+    expect(recordsTaken(duration, taken)).toEqual(['daily flows'])
+  })
+
+  it('that is empty is asked for', () => {
+    const none = after(duration, startForm(duration), {
+      do: 'take-record',
+      key: 'dailyFlows',
+      record: { values: [], from: '' },
+    })
+    expect(errorsOf(duration, none)['dailyFlows']).toMatch(/choose a file/)
+  })
+})
+
+describe('what belongs to a choice', () => {
+  const thrust = calculator('thrust')
+
+  it('is shown with that choice alone', () => {
+    const bend = startForm(thrust, { kind: 'bend', bendAngle: '45°' })
+    expect(shownKeys(thrust, bend)).toContain('bendAngle')
+    const end = after(thrust, bend, { do: 'write', path: 'kind', text: 'dead-end' })
+    expect(shownKeys(thrust, end)).not.toContain('bendAngle')
+    expect(readForm(thrust, end).inputs).not.toHaveProperty('bendAngle')
+  })
+})
+
+it('a figure from a table fills every field that it has', () => {
+  const form = after(penstock, startForm(penstock), {
+    do: 'fill',
+    texts: [{ path: 'grossHead', text: '31.4 m', cell: netHead }],
+  })
+  expect(form.fields['grossHead']).toEqual({ text: '31.4', unit: 'm' })
 })
