@@ -25,6 +25,7 @@ const perimeterAt = ({ bottomWidth, sideSlope }: Channel, depth: number) =>
 
 /** Manning: Q = A·R^(2/3)·S^(1/2)/n, for even flow at this depth. */
 const flowAt = (channel: Channel, depth: number): number => {
+  if (depth === 0) return 0
   const area = areaAt(channel, depth)
   return (area * Math.cbrt(area / perimeterAt(channel, depth)) ** 2 * Math.sqrt(channel.bedSlope)) / channel.manningN
 }

@@ -1,4 +1,4 @@
-import { g, gravity } from '../constants.ts'
+import { gravity } from '../constants.ts'
 import { defineCalculator } from '../definition.ts'
 import { flow, insideDiameter } from '../pipe/inputs.ts'
 import { velocityHead } from '../pipe/friction-factor.ts'
