@@ -85,13 +85,14 @@ await stop()
 
 let isFaulty = strange.length > 0
 for (const { fault, json } of strange) console.error(`FAULT ${fault}\n  of ${json}`)
-console.log(`${'calculator'.padEnd(20)}  tries  to the sums  answered  worst ms  refusals`)
+const wide = Math.max(...definitions.map(({ id }) => id.length), 'calculator'.length)
+console.log(`${'calculator'.padEnd(wide)}   tries  to the sums  answered  worst ms  refusals`)
 for (const [id, { tries, reached, answered, refusals, worst, faults }] of tallies) {
   const share = reached / tries
   const codes = Object.entries(refusals).sort(([a], [b]) => a.localeCompare(b))
   console.log(
     [
-      id.padEnd(20),
+      id.padEnd(wide),
       String(tries).padStart(6),
       `${(100 * share).toFixed(0)} %`.padStart(11),
       String(answered).padStart(8),
