@@ -17,6 +17,9 @@ export const rowsOf = (values: Inputs | Outputs, key: string): readonly PlainRow
   return Array.isArray(value) ? (value as readonly PlainRow[]) : []
 }
 
+/** A number that was given, for a label: no longer than four digits. */
+export const short = (value: number): number => Number(value.toPrecision(4))
+
 /** About how wide a text of the label face is. */
 export const textWidth = (text: string, size = 15): number => text.length * size * 0.54
 
@@ -50,6 +53,31 @@ export function Arrow({ x, y, length, colour }: { x: number; y: number; length: 
       <path d={`M${x + length} ${y}l-12 -7v14z`} fill={colour} />
     </>
   )
+}
+
+interface Point {
+  x: number
+  y: number
+}
+
+/** An arrow from one point to another, however they lie. */
+export function Push({ from, to, colour }: { from: Point; to: Point; colour: string }) {
+  const length = Math.hypot(to.x - from.x, to.y - from.y)
+  if (length < 1) return null
+  const degrees = (Math.atan2(to.y - from.y, to.x - from.x) * 180) / Math.PI
+  const head = Math.min(12, length)
+  return (
+    <g transform={`translate(${from.x} ${from.y}) rotate(${degrees})`}>
+      <path d={`M0 0H${length - head}`} stroke={colour} strokeWidth="3" />
+      <path d={`M${length} 0l${-head} -6v12z`} fill={colour} />
+    </g>
+  )
+}
+
+/** The same heights, from above down, moved apart where labels would lie on one another. */
+export const apart = (heights: readonly number[], least = 19): number[] => {
+  let below = -Infinity
+  return heights.map((height) => (below = Math.max(height, below + least)))
 }
 
 /** The largest of 1, 2, 5, 10, 20 … that is not above a value. */
