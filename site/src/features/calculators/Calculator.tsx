@@ -25,6 +25,7 @@ import {
   changeForm,
   recordsTaken,
   solveForm,
+  startAgainUntouched,
   startForm,
   type Form,
   type FormAction,
@@ -68,8 +69,9 @@ const settleMilliseconds = 700
 
 interface State {
   form: Form
-  /** As it started: nothing was written yet. */
-  isUntouched: boolean
+  /** As it started, and how it would start now: in other units. */
+  started: Form
+  restart: () => Form
   system: UnitSystem
   /** The last form that could be worked out. */
   good: Form | undefined
@@ -85,13 +87,16 @@ const LiveDrawing = memo(function LiveDrawing({ id, solved }: { id: string; solv
 export function Calculator({ definition, preset, texts, show, headingLevel, onSettle, plot }: CalculatorProps) {
   const { id } = definition
   const system = useUnits()
-  const start = (): State => {
-    const form = startForm(definition, texts ?? preset)
-    return { form, good: solveForm(definition, form).solution ? form : undefined, isUntouched: true, system }
+  const [state, setState] = useState((): State => {
+    const restart = () => startForm(definition, texts ?? preset)
+    const form = restart()
+    return { form, good: solveForm(definition, form).solution ? form : undefined, started: form, restart, system }
+  })
+  if (state.system !== system) {
+    const started = state.restart()
+    const form = startAgainUntouched(state.form, state.started, started)
+    setState({ ...state, form, good: solveForm(definition, form).solution ? form : state.good, started, system })
   }
-  const [state, setState] = useState(start)
-  // What was written stays as it was written; a form that nobody touched starts again in the other units.
-  if (state.system !== system) setState(state.isUntouched ? start() : { ...state, system })
   const { form, good } = state
   const [said, setSaid] = useState('')
   const [example, setExample] = useState<Form>()
@@ -106,9 +111,14 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
 
   useEffect(() => () => window.clearTimeout(settling.current), [])
 
-  const put = (next: Form) => {
+  const put = (next: Form, restart?: () => Form) => {
     const result = solveForm(definition, next)
-    setState({ form: next, good: result.solution ? next : good, isUntouched: false, system })
+    setState({
+      ...state,
+      ...(restart ? { started: next, restart } : {}),
+      form: next,
+      good: result.solution ? next : good,
+    })
     window.clearTimeout(settling.current)
     settling.current = window.setTimeout(() => {
       setSaid(
@@ -119,10 +129,10 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
       onSettle?.(searchOf(definition, next))
     }, settleMilliseconds)
   }
-  const tryExample = () => {
-    const next = exampleForm(definition)
-    setExample(next)
-    put(next)
+  const begin = (restart: () => Form) => {
+    const next = restart()
+    put(next, restart)
+    return next
   }
   const change = (action: FormAction) => put(changeForm(definition, form, action))
 
@@ -161,11 +171,21 @@ export function Calculator({ definition, preset, texts, show, headingLevel, onSe
                 path={() => `/calculators/${id}${searchOf(definition, form)}`}
                 leavesOut={recordsTaken(definition, form)}
               />
-              <Button type="button" size="3" variant="outline" onClick={() => put(startForm(definition, preset))}>
+              <Button
+                type="button"
+                size="3"
+                variant="outline"
+                onClick={() => begin(() => startForm(definition, preset))}
+              >
                 Start again
               </Button>
               {isAlone && (
-                <Button type="button" size="3" variant="outline" onClick={tryExample}>
+                <Button
+                  type="button"
+                  size="3"
+                  variant="outline"
+                  onClick={() => setExample(begin(() => exampleForm(definition)))}
+                >
                   Try an example
                 </Button>
               )}

@@ -45,6 +45,21 @@ function Problems({ problems }: { problems: readonly RecordProblem[] }) {
   )
 }
 
+const counted = (count: number, word: string) => `${count} ${word}${count === 1 ? '' : 's'}`
+
+const longDate = (date: string) =>
+  new Date(date).toLocaleDateString('en-GB', { day: 'numeric', month: 'long', year: 'numeric', timeZone: 'UTC' })
+
+const day = 86_400_000
+
+/** From when to when a record goes, and how many days of that it has not. */
+const spanOf = ({ days }: DailyRecord): string => {
+  const [first, last] = [days[0]?.date, days.at(-1)?.date]
+  if (first === undefined || last === undefined) return ''
+  const missing = (Date.parse(last) - Date.parse(first)) / day + 1 - days.length
+  return `, ${longDate(first)} to ${longDate(last)}${missing > 0 ? `, ${counted(missing, 'day')} missing` : ''}`
+}
+
 /** Years of daily flows: from a file that is chosen or dropped, or pasted. It is read here and goes nowhere. */
 export function RecordField({ idOf, path, input, record, error, change, after }: RecordFieldProps) {
   const id = useId()
@@ -103,7 +118,8 @@ export function RecordField({ idOf, path, input, record, error, change, after }:
         onDrop={drop}
       >
         <p className="record-name">
-          <strong>{record.from}</strong>: {record.values.length} {input.row}s
+          <strong>{record.from}</strong>: {counted(record.values.length, input.row)}
+          {source?.record === record && spanOf(source.read)}
         </p>
         <SparkLine values={record.values} />
         <label className="file-choice no-print">

@@ -131,8 +131,8 @@ export function RowTable(props: RowTableProps) {
                       {own.map(([name, cell]) => (
                         <span key={name} className="detail">
                           <label htmlFor={idOf(pathOf(input, path, i, name))}>
-                            {cell.label} <CellSymbol cell={cell} />
-                            {ofRow(i)}
+                            {cell.label}
+                            {ofRow(i)} <CellSymbol cell={cell} />
                           </label>
                           {cellAt(row, i, name, cell, true)}
                         </span>

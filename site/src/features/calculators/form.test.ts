@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { calculator } from '#calc/index.ts'
 import { uncertaintyOf } from '#calc/uncertainty.ts'
+import { showUnitsOf } from '#calc/units/system.ts'
 import { unitOf, unitsOf } from './field-text.ts'
 import {
   changeForm,
@@ -8,6 +9,7 @@ import {
   recordsTaken,
   shownKeys,
   solveForm,
+  startAgainUntouched,
   startForm,
   type Form,
   type FormAction,
@@ -261,4 +263,18 @@ it('a figure from a table fills every field that it has', () => {
     texts: [{ path: 'grossHead', text: '31.4 m', cell: netHead }],
   })
   expect(form.fields['grossHead']).toEqual({ text: '31.4', unit: 'm' })
+})
+
+it('in other units only what nobody wrote in turns', () => {
+  const started = startForm(penstock)
+  const form = after(penstock, started, { do: 'write', path: 'sections.0.length', text: '200' })
+  showUnitsOf('imperial')
+  try {
+    const turned = startAgainUntouched(form, started, startForm(penstock))
+    expect(turned.fields['grossHead']).toEqual({ text: '157.5', unit: 'ft' })
+    expect(turned.rows['sections']![0]!['length']).toEqual({ text: '200', unit: 'm' })
+    expect(turned.rows['sections']![0]!['insideDiameter']).toEqual({ text: '3.811', unit: 'in' })
+  } finally {
+    showUnitsOf('metric')
+  }
 })

@@ -257,6 +257,18 @@ const setField = (form: Form, path: string, change: (field: FieldText) => FieldT
   return { ...form, rows: { ...form.rows, [key]: rows } }
 }
 
+/** What nobody wrote in, as it would start now, such as in other units; what was written stays as it is. */
+export const startAgainUntouched = (form: Form, started: Form, again: Form): Form => {
+  const turn = (field: FieldText, was: FieldText | undefined, now: FieldText | undefined) =>
+    now && was?.text === field.text && was.unit === field.unit ? now : field
+  const turnAll = (texts: RowTexts, was: RowTexts = {}, now: RowTexts = {}): RowTexts =>
+    Object.fromEntries(Object.entries(texts).map(([name, field]) => [name, turn(field, was[name], now[name])]))
+  const rows: Record<string, readonly RowTexts[]> = {}
+  for (const [key, list] of Object.entries(form.rows))
+    rows[key] = list.map((row, i) => turnAll(row, started.rows[key]?.[i], again.rows[key]?.[i]))
+  return { ...form, fields: turnAll(form.fields, started.fields, again.fields), rows }
+}
+
 export type FormAction =
   | { do: 'write'; path: string; text: string }
   | { do: 'change-unit'; path: string; cell: ScalarCell; unit: string }
