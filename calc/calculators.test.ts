@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import { calculators } from './calculators.ts'
+import { hasPlace } from './check.ts'
 import type {
   CalculatorDefinition,
   Caution,
@@ -139,11 +140,17 @@ const cellsOf = ({ inputs }: CalculatorDefinition, values: Inputs) => {
     }
     if (input.kind === 'group')
       for (const [column, cell] of Object.entries(input.columns))
-        add(`${key}.${column}`, cell, (put) => ({ ...values, [key]: { ...(value as PlainRow), [column]: put } }))
-    if (input.kind === 'rows' && (value as readonly PlainRow[]).length > 0)
+        if (hasPlace(cell, input.columns, value as PlainRow))
+          add(`${key}.${column}`, cell, (put) => ({ ...values, [key]: { ...(value as PlainRow), [column]: put } }))
+    if (input.kind === 'rows')
       for (const [column, cell] of Object.entries(input.columns)) {
-        const [first, ...rest] = value as readonly PlainRow[]
-        add(`${key}[0].${column}`, cell, (put) => ({ ...values, [key]: [{ ...first, [column]: put }, ...rest] }))
+        const rows = value as readonly PlainRow[]
+        const place = rows.findIndex((row) => hasPlace(cell, input.columns, row))
+        if (place < 0) continue
+        add(`${key}[${place}].${column}`, cell, (put) => ({
+          ...values,
+          [key]: rows.map((row, i) => (i === place ? { ...row, [column]: put } : row)),
+        }))
       }
   }
   return cells

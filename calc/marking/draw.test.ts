@@ -142,7 +142,7 @@ describe('a bank that asks for what cannot be', () => {
     ['an output', { ask: 'colour' }, 'has no number “colour” to ask for'],
     ['a name of the language’s own', { ask: 'constructor' }, 'has no number “constructor”'],
     ['an input', { inputs: { colour: 'netHead' } }, 'has no input called “colour”'],
-    ['an input with a wrong unit', { fixed: { ...jetSpeed.fixed, flow: '6 kg' } }, '“kg” does not measure this'],
+    ['an input with a wrong unit', { fixed: { ...jetSpeed.fixed, flow: '6 kg' } }, '“kg” measures mass'],
     ['a number without its unit', { fixed: { ...jetSpeed.fixed, flow: 6 } }, 'Say the unit too, for example 9.5 L/s'],
     ['a missing input', { fixed: { velocityCoefficient: 0.97, jetCount: 1 } }, 'Give Flow or Nozzle diameter'],
     ['a list for one value', { fixed: { ...jetSpeed.fixed, flow: ['6 L/s'] } }, 'wants one value, not a list'],
