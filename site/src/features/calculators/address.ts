@@ -10,6 +10,8 @@ import { lineWithUnit } from './line-text.ts'
 /** A field as one text: with its unit, unless one is written in it. */
 const withUnit = (cell: Cell, { text, unit }: FieldText): string => {
   if (cell.kind === 'choice' || unit === '' || text.trim() === '') return text
+  const written = parse(text, cell.quantity)
+  if (written.ok && written.unit !== '') return text
   const alone = parse(text, cell.quantity, unit)
   const together = parse(`${text} ${unit}`, cell.quantity, unit)
   return alone.ok && together.ok && together.value === alone.value && together.uncertainty === alone.uncertainty
