@@ -120,7 +120,7 @@ export const beltDrive = defineCalculator({
       },
       {
         say: 'The straight parts of the belt lean from the larger pulley down to the smaller.',
-        formula: write`\text{the sine of } ${{ ...phi, unit: '°' }} = \frac{${large} - ${small}}{2 \, ${'centreDistance'}}`,
+        formula: write`\sin(${{ ...phi, unit: '°' }}) = \frac{${large} - ${small}}{2 \, ${'centreDistance'}}`,
       },
       {
         say: 'The smaller pulley loses that lean twice from its half turn of belt.',

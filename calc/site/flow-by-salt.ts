@@ -13,10 +13,10 @@ const faintPeak = 0.5
 const underBackground = 0.02
 
 /**
- * Flow by salt dilution, one dose: Q = M/(CF·∫(κ − κ₀)dt), M the mass of salt, κ the conductivity downstream over the background κ₀, CF the
- * salt in mg/L for each µS/cm. SI but for κ in µS/cm and CF. The integral by the trapezium rule; readings a little under the background
+ * Flow by salt dilution, one dose: Q = M/(k·∫(κ − κ₀)dt), M the mass of salt, κ the conductivity downstream over the background κ₀, k the
+ * salt in mg/L for each µS/cm. SI but for κ in µS/cm and k in mg/L for each. The integral by the trapezium rule; readings a little under the background
  * count minus, so that the meter's noise cancels. `recovered` is the area read over that area and the tail still to come (an exponential
- * fitted to the falling limb). Valid where the salt is mixed over the whole stream; errors 5 % with care, CF alone 1 to 4 %. Refused: times
+ * fitted to the falling limb). Valid where the salt is mixed over the whole stream; errors 5 % with care, k alone 1 to 4 %. Refused: times
  * that do not rise (`inconsistent`), readings without a peak over the background (`no-solution`). Sources below.
  */
 export const flowBySalt = defineCalculator({
@@ -84,7 +84,7 @@ export const flowBySalt = defineCalculator({
     },
     calibration: {
       kind: 'scalar',
-      symbol: 'CF',
+      symbol: 'k',
       label: 'Calibration',
       quantity: 'saltCalibration',
       help: 'salt for each step of the meter, tried in a bucket of this stream; about 0.49 at 25 °C compensation',
@@ -134,6 +134,11 @@ export const flowBySalt = defineCalculator({
   working(write, { readings, background }) {
     const curve = saltCurve(readings, background)!
     const area = { symbol: 'A', value: curve.area, say: 'the area over the background' }
+    const strips = {
+      symbol: '\\textstyle\\sum \\frac{1}{2} (\\Delta\\kappa_1 + \\Delta\\kappa_2) \\, \\Delta t',
+      value: curve.area,
+      say: 'the sum of all strips',
+    }
     const tail = { symbol: 'A_t', value: curve.tail, say: 'the area of the tail', digits: 3 }
     return [
       {
@@ -143,7 +148,7 @@ export const flowBySalt = defineCalculator({
       },
       {
         say: 'Strip by strip between the readings: mean height over the background, times the time between.',
-        formula: write`\textstyle\sum \frac{1}{2} (\Delta\kappa_1 + \Delta\kappa_2) \Delta t = ${{ ...area, unit: 'µS·s/cm' }}`,
+        formula: write`${strips} = ${{ ...area, unit: 'µS·s/cm' }}`,
       },
       {
         say: 'The same salt in more water makes a smaller area: the thousand is milligrams in a kilogram over litres in a cubic metre.',

@@ -68,6 +68,7 @@ const greek: Readonly<Record<string, string>> = {
   zeta: 'ζ',
   eta: 'η',
   theta: 'θ',
+  kappa: 'κ',
   lambda: 'λ',
   mu: 'μ',
   nu: 'ν',
