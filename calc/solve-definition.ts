@@ -9,6 +9,8 @@ import {
   type Outputs,
   type OutputValue,
   type PlainRow,
+  type Runs,
+  type Series,
 } from './definition.ts'
 import { CalculationError } from './errors.ts'
 import { writeFormula } from './formula.ts'
@@ -29,7 +31,7 @@ const isBad = (value: OutputValue | undefined): boolean =>
     : isBadNumber(value)
 
 /** Solves what was checked already; no output is ever NaN or infinite. */
-const found = (definition: CalculatorDefinition, given: Inputs): Outputs => {
+export const solveChecked = (definition: CalculatorDefinition, given: Inputs): Outputs => {
   const outputs = definition.solve(given)
   for (const key of Object.keys(outputs))
     if (isBad(outputs[key]))
@@ -43,7 +45,7 @@ const found = (definition: CalculatorDefinition, given: Inputs): Outputs => {
 
 /** Checks and solves, without working or cautions: for roots, plots, uncertainties and marking. Throws `CalculationError` for bad input. */
 export const calculateDefinition = (definition: CalculatorDefinition, inputs: unknown): Outputs =>
-  found(definition, checkInputs(definition, inputs))
+  solveChecked(definition, checkInputs(definition, inputs))
 
 const unusual = (cell: Cell, key: string, name: string, value: unknown): Caution[] =>
   cell.kind === 'scalar' && cell.usual && typeof value === 'number' && (value < cell.usual[0] || value > cell.usual[1])
@@ -64,17 +66,25 @@ const rowsOf = (value: InputValue | undefined): readonly PlainRow[] =>
 
 const numbersOf = (value: InputValue | undefined): readonly unknown[] => (Array.isArray(value) ? value : [])
 
+/** Of many numbers one caution: by its place where it is one, else by how many. */
+const unusualNumbers = (input: Series | Runs, key: string, values: readonly unknown[]): Caution[] => {
+  const odd = values.flatMap((value, i) => unusual(numberOf(input, i), key, numberOf(input, i).label, value))
+  if (odd.length < 2 || !input.usual) return odd
+  const [low, high] = input.usual
+  const { row, quantity, unit } = input
+  const words = `${odd.length} of the ${row}s are unusual: they mostly lie between ${say(low, quantity, unit)} and ${say(high, quantity, unit)}.`
+  return [{ level: 'check', about: [key], say: words }]
+}
+
 /** One caution for each given value outside its usual range. */
 const unusualValues = (definition: CalculatorDefinition, given: Inputs): Caution[] =>
   Object.entries(definition.inputs).flatMap(([key, input]) =>
     input.kind === 'scalar' || input.kind === 'choice'
       ? unusual(input, key, input.label, given[key])
       : input.kind === 'series'
-        ? numbersOf(given[key]).flatMap((value, i) => unusual(numberOf(input, i), key, numberOf(input, i).label, value))
+        ? unusualNumbers(input, key, numbersOf(given[key]))
         : input.kind === 'runs'
-          ? runsOf(given[key]).flatMap((run) =>
-              run.flatMap((value, i) => unusual(numberOf(input, i), key, numberOf(input, i).label, value)),
-            )
+          ? unusualNumbers(input, key, runsOf(given[key]).flat())
           : rowsOf(given[key]).flatMap((row, i) =>
               Object.entries(input.columns).flatMap(([name, cell]) =>
                 unusual(
@@ -92,7 +102,7 @@ const worstFirst = { stop: 0, check: 1, note: 2 }
 /** Solves one calculator: outputs in SI, the printed working, the cautions, worst first. Throws `CalculationError` for bad input. */
 export const solveDefinition = (definition: CalculatorDefinition, inputs: unknown): Solution => {
   const given = checkInputs(definition, inputs)
-  const outputs = found(definition, given)
+  const outputs = solveChecked(definition, given)
   return {
     outputs,
     working: printWorking(definition, definition.working(writeFormula, given, outputs), given, outputs),

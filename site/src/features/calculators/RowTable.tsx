@@ -79,7 +79,7 @@ export function RowTable(props: RowTableProps) {
   if (!first) return null
   return (
     <>
-      <table className={columns.length > 1 ? 'row-table' : 'row-table row-table-one'}>
+      <table className={columns.length > 2 ? 'row-table' : 'row-table row-table-slim'}>
         <thead>
           <tr>
             <th scope="col">
