@@ -33,6 +33,8 @@ export const showUnitsOf = (system: UnitSystem): void => {
   shown = system
 }
 
+export const shownSystem = (): UnitSystem => shown
+
 /** The unit in which one of this name is shown. */
 export const shownUnit = (quantity: Quantity, name: string): string => {
   const other = shown === 'imperial' ? imperialFor[name] : undefined

@@ -1,6 +1,7 @@
 import type { CalculatorDefinition, Cell, Input, Inputs, InputValue, PlainRow, PlainValue } from '#calc/index.ts'
 import { CalculationError } from '#calc/errors.ts'
 import { solveDefinition, type Solution } from '#calc/solve-definition.ts'
+import { shownSystem, type UnitSystem } from '#calc/units/system.ts'
 import {
   columnsOf,
   columnsOfRow,
@@ -237,8 +238,20 @@ export interface Solved {
 }
 export type Attempt = Solved | { solution?: undefined; errors: Readonly<Record<string, string>> }
 
+/** A form is worked out once, however many ask: when it is written, and when it is drawn. What is said of it goes with the units shown. */
+const attempts = new WeakMap<Form, { system: UnitSystem; attempt: Attempt }>()
+
 /** Works the form out, or says by path what stands in the way. */
 export const solveForm = (definition: CalculatorDefinition, form: Form): Attempt => {
+  const system = shownSystem()
+  const known = attempts.get(form)
+  if (known?.system === system) return known.attempt
+  const attempt = workOut(definition, form)
+  attempts.set(form, { system, attempt })
+  return attempt
+}
+
+const workOut = (definition: CalculatorDefinition, form: Form): Attempt => {
   const { inputs, uncertainties, errors } = readForm(definition, form)
   if (Object.keys(errors).length > 0) return { errors }
   try {
