@@ -73,11 +73,12 @@ export const headByLevels = defineCalculator({
     const aside = (symbol: string, value: number, say: string) => ({ symbol, value, say, digits: 6 })
     const count = aside('n', runs.length, 'the number of runs')
     const all = aside('\\textstyle\\sum H_i', total(sums), 'the sum of all runs')
-    const deviation = aside(
-      's',
-      standardUncertainty === undefined ? 0 : standardUncertainty * Math.sqrt(runs.length),
-      'the standard deviation of the runs',
-    )
+    const deviation = {
+      symbol: 's',
+      value: (standardUncertainty ?? 0) * Math.sqrt(runs.length),
+      say: 'the standard deviation of the runs',
+      digits: 3,
+    }
     return [
       ...sums.map((sum, i) => ({
         say: `The rises of run ${i + 1} stand one on another.`,
@@ -149,12 +150,12 @@ export const headByLevels = defineCalculator({
     'whether the water at the intake stands this high when the stream is low',
   ],
   example: {
-    say: 'Sorrelthwaite: three runs with a hand level, one of them by somebody else.',
+    say: 'Sorrelthwaite: three runs with a level and a staff, one of them by somebody else.',
     inputs: {
       runs: [
-        [6.42, 5.9, 7.15, 6.63, 5.48, 2.71],
-        [5.77, 6.31, 6.84, 7.02, 6.19, 2.05],
-        [6.6, 6.6, 6.6, 6.6, 6.6, 1.34],
+        [4.42, 4.9, 4.15, 4.63, 4.48, 4.71, 4.8, 2.2],
+        [4.77, 4.31, 4.84, 4.02, 4.19, 4.66, 4.55, 2.84],
+        [4.6, 4.6, 4.6, 4.6, 4.6, 4.6, 4.6, 2.14],
       ],
     },
   },
