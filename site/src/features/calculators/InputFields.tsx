@@ -1,8 +1,11 @@
-import { useId, useState, type ReactNode } from 'react'
+import { memo, useCallback, useId, useState } from 'react'
 import type { CalculatorDefinition, Caution as CautionOf, Input } from '#calc/index.ts'
+import { useSteady } from '../../lib/use-steady.ts'
+import { useUnits } from '../../lib/unit-preference.ts'
 import { CautionList } from './CautionList.tsx'
-import { CellField } from './CellField.tsx'
+import { CellField, type CellFieldProps } from './CellField.tsx'
 import { isMany, isRecord } from './columns.ts'
+import { errorsUnder } from './errors-under.ts'
 import { shownKeys, type Form, type FormAction } from './form.ts'
 import { ManyField } from './ListField.tsx'
 import { Picker } from './Picker.tsx'
@@ -62,41 +65,50 @@ const mayBeUncertain = ({ inputs }: CalculatorDefinition) =>
         : 'columns' in input && Object.values(input.columns).some((cell) => cell.kind === 'scalar' && !cell.whole),
   )
 
+interface OneFieldProps extends Omit<CellFieldProps, 'after'> {
+  inputs: CalculatorDefinition['inputs']
+  cautions: readonly CautionOf[] | undefined
+}
+
+/** Drawn anew only when it is written in, or something else is said of it. */
+const OneField = memo(function OneField({ inputs, cautions, ...props }: OneFieldProps) {
+  useUnits()
+  return (
+    <CellField
+      {...props}
+      after={
+        <>
+          <Picker cells={inputs} name={props.path} pathOf={(other) => other} change={props.change} />
+          <CautionList cautions={cautions} />
+        </>
+      }
+    />
+  )
+})
+
 /** All fields of a calculator, in the order of its definition. */
-export function InputFields({ definition, form, errors, cautions, change }: FieldsProps) {
+export function InputFields({ definition, form, errors, cautions, change: changeNow }: FieldsProps) {
   const id = useId()
   const [open, setOpen] = useState(false)
-  const idOf = (path: string) => `${id}${path}`
+  const idOf = useCallback((path: string) => `${id}${path}`, [id])
+  const change = useSteady(changeNow)
   const { inputs } = definition
   const shown = shownKeys(definition, form)
   const spare = shown.filter((key) => isSpare(inputs[key]!))
   const stepsBack = spare.length >= manyOptional
-  const isUnder = (key: string) => Object.keys(errors).some((path) => path === key || path.startsWith(`${key}.`))
+  const isUnder = (key: string) => Object.keys(errorsUnder(errors, key)).length > 0
 
   const fieldOf = (key: string) => {
     const input = inputs[key]!
-    const after = <CautionList cautions={cautions.get(key)} />
     const pair = input.or === undefined ? undefined : inOrder(Object.keys(inputs), key, input.or)
-    const common = { path: key, idOf, change }
-    let field: ReactNode
-    if (isRecord(input))
-      field = <RecordField {...common} input={input} record={form.records[key]!} error={errors[key]} after={after} />
-    else if (isMany(input)) field = <ManyField {...common} {...{ form, input, errors, after }} />
-    else
-      field = (
-        <CellField
-          {...common}
-          cell={input}
-          field={form.fields[key]!}
-          error={errors[key]}
-          after={
-            <>
-              <Picker cells={inputs} name={key} pathOf={(other) => other} change={change} />
-              {after}
-            </>
-          }
-        />
-      )
+    const common = { path: key, idOf, change, cautions: cautions.get(key) }
+    const field = isRecord(input) ? (
+      <RecordField {...common} input={input} record={form.records[key]!} error={errors[key]} />
+    ) : isMany(input) ? (
+      <ManyField {...common} input={input} rows={form.rows[key]!} errors={errorsUnder(errors, key)} />
+    ) : (
+      <OneField {...common} inputs={inputs} cell={input} field={form.fields[key]!} error={errors[key]} />
+    )
     return (
       // The switch between two alternatives keeps its place and its focus when it is used.
       <div key={pair ? pair.join() : key}>

@@ -1,33 +1,38 @@
 import { Button } from '@radix-ui/themes'
-import { useState, type ClipboardEvent, type KeyboardEvent, type ReactNode } from 'react'
+import { memo, useState, type ClipboardEvent, type KeyboardEvent, type ReactNode } from 'react'
 import { flushSync } from 'react-dom'
+import type { Caution } from '#calc/index.ts'
+import { useSteady } from '../../lib/use-steady.ts'
+import { useUnits } from '../../lib/unit-preference.ts'
+import { CautionList } from './CautionList.tsx'
 import { capital, columnsOf, isList, pathOf, rowWord, type ListInput, type ManyInput } from './columns.ts'
-import { type Form, type FormAction, type RowTexts } from './form.ts'
+import type { FormAction, RowTexts } from './form.ts'
 import './list-field.css'
 import { pasteBlock } from './paste.ts'
 import { RowFields } from './RowFields.tsx'
 import { RowTable } from './RowTable.tsx'
 
 export interface ManyProps<I extends ManyInput = ManyInput> {
-  form: Form
   path: string
   input: I
+  /** A group is a list of one. */
+  rows: readonly RowTexts[]
   errors: Readonly<Record<string, string>>
   idOf: (path: string) => string
   change: (action: FormAction) => void
-  after: ReactNode
+  cautions: readonly Caution[] | undefined
 }
 
 const article = (word: string) => (/^[aeiou]/.test(word) ? 'an' : 'a')
 
-export function ManyFrame({ path, input, errors, idOf, after, children }: ManyProps & { children: ReactNode }) {
+export function ManyFrame({ path, input, errors, idOf, cautions, children }: ManyProps & { children: ReactNode }) {
   return (
     <fieldset className="field-list" id={idOf(path)}>
       <legend>{input.label}</legend>
       {input.help && <p className="field-help">{input.help}</p>}
       {children}
       {errors[path] && <p className="field-error">{errors[path]}</p>}
-      {after}
+      <CautionList cautions={cautions} />
     </fieldset>
   )
 }
@@ -39,8 +44,7 @@ interface Note {
 
 /** A list of rows: written, pasted from a spreadsheet, taken out and put back. */
 export function ListField(props: ManyProps<ListInput>) {
-  const { form, path, input, idOf, change } = props
-  const rows = form.rows[path]!
+  const { path, input, rows, idOf, change } = props
   const [note, setNote] = useState<Note>()
   const word = rowWord(input)
   const addId = idOf(`${path}-add`)
@@ -67,7 +71,7 @@ export function ListField(props: ManyProps<ListInput>) {
     goTo(addId)
   }
   const paste = (event: ClipboardEvent, row: number, column: string) => {
-    const pasted = pasteBlock(form, input, { key: path, row, column }, event.clipboardData.getData('text'))
+    const pasted = pasteBlock(rows, input, { row, column }, event.clipboardData.getData('text'))
     if (!pasted) return
     event.preventDefault()
     setNote({ say: pasted.say, before: rows })
@@ -80,10 +84,11 @@ export function ListField(props: ManyProps<ListInput>) {
     else if (!goTo(fieldId(row + by, name))) goTo(fieldId(row + by, names[0]!))
     event.preventDefault()
   }
+  const [steadyPaste, steadyMove, steadyRemove] = [useSteady(paste), useSteady(move), useSteady(remove)]
 
   return (
     <ManyFrame {...props}>
-      <RowTable {...props} rows={rows} onPaste={paste} onMove={move} mayLose={mayLose} onRemove={remove} />
+      <RowTable {...props} onPaste={steadyPaste} onMove={steadyMove} mayLose={mayLose} onRemove={steadyRemove} />
       <div className="list-actions no-print">
         <Button type="button" id={addId} variant="outline" size="3" onClick={() => add()} disabled={isFull}>
           Add {article(word)} {word}
@@ -113,7 +118,9 @@ export function ListField(props: ManyProps<ListInput>) {
   )
 }
 
-export function ManyField(props: ManyProps) {
+/** Drawn anew only when something in it is other than it was. */
+export const ManyField = memo(function ManyField(props: ManyProps) {
+  useUnits()
   const { input } = props
   if (isList(input)) return <ListField {...props} input={input} />
   return (
@@ -121,4 +128,4 @@ export function ManyField(props: ManyProps) {
       <RowFields {...props} input={input} />
     </ManyFrame>
   )
-}
+})

@@ -1,5 +1,7 @@
 import { Button } from '@radix-ui/themes'
-import { useId, useState, type DragEvent, type ReactNode } from 'react'
+import { memo, useId, useState, type DragEvent } from 'react'
+import type { Caution } from '#calc/index.ts'
+import { CautionList } from './CautionList.tsx'
 import type { RecordInput } from './columns.ts'
 import type { DailyRecord, FlowUnit, Reading, RecordOptions, RecordProblem } from './daily-record.ts'
 import type { DayOrMonthFirst } from './daily-record-dates.ts'
@@ -15,7 +17,7 @@ interface RecordFieldProps {
   record: FlowRecord
   error: string | undefined
   change: (action: FormAction) => void
-  after: ReactNode
+  cautions: readonly Caution[] | undefined
 }
 
 interface Source {
@@ -61,7 +63,15 @@ const spanOf = ({ days }: DailyRecord): string => {
 }
 
 /** Years of daily flows: from a file that is chosen or dropped, or pasted. It is read here and goes nowhere. */
-export function RecordField({ idOf, path, input, record, error, change, after }: RecordFieldProps) {
+export const RecordField = memo(function RecordField({
+  idOf,
+  path,
+  input,
+  record,
+  error,
+  change,
+  cautions,
+}: RecordFieldProps) {
   const id = useId()
   const [source, setSource] = useState<Source>()
   const [over, setOver] = useState(false)
@@ -196,10 +206,10 @@ export function RecordField({ idOf, path, input, record, error, change, after }:
           Back to the invented year
         </Button>
       )}
-      {after}
+      <CautionList cautions={cautions} />
     </fieldset>
   )
-}
+})
 
 const units: readonly FlowUnit[] = ['L/s', 'm³/s', 'ft³/s']
 const orderWords: Readonly<Record<DayOrMonthFirst, string>> = {

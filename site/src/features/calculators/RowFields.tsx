@@ -6,9 +6,9 @@ import type { ManyProps } from './ListField.tsx'
 import { Picker } from './Picker.tsx'
 
 /** The fields of a group; those that may stay empty and do step back where they are more than one. */
-export function RowFields({ form, input, path, errors, idOf, change }: ManyProps<Extract<Input, { kind: 'group' }>>) {
+export function RowFields({ rows, input, path, errors, idOf, change }: ManyProps<Extract<Input, { kind: 'group' }>>) {
   const [asked, setAsked] = useState(false)
-  const row = form.rows[path]![0]!
+  const row = rows[0]!
   const columns = columnsOfRow(input, row)
   const pathOfCell = (name: string) => pathOf(input, path, 0, name)
   const names = Object.keys(columns)

@@ -1,18 +1,15 @@
-import { useState, type ClipboardEvent, type KeyboardEvent, type ReactNode } from 'react'
+import { useState, type ClipboardEvent, type KeyboardEvent } from 'react'
 import type { Cell } from '#calc/index.ts'
-import { MathSymbol } from '../../components/Formula.tsx'
 import { unitWords } from '../../components/QuantityField.tsx'
 import { helpOf } from './CellField.tsx'
-import { capital, columnsOf, columnsOfRow, pathOf, rowWord, type ListInput, type ScalarCell } from './columns.ts'
-import { readField, unitOf, unitsOf, type FieldText } from './field-text.ts'
-import type { RowTexts } from './form.ts'
-import { unitOfLine } from './line-text.ts'
+import { capital, columnsOf, pathOf, rowWord, type ListInput, type ScalarCell } from './columns.ts'
+import { errorsUnder } from './errors-under.ts'
+import { readField, unitsOf, type FieldText } from './field-text.ts'
 import type { ManyProps } from './ListField.tsx'
 import { Picker } from './Picker.tsx'
-import { TableCell } from './TableCell.tsx'
+import { CellSymbol, TableRow, unitIn } from './TableRow.tsx'
 
 interface RowTableProps extends ManyProps<ListInput> {
-  rows: readonly RowTexts[]
   mayLose: boolean
   onRemove: (number: number) => void
   onPaste: (event: ClipboardEvent, row: number, column: string) => void
@@ -36,7 +33,6 @@ export function RowTable(props: RowTableProps) {
   const [asked, setAsked] = useState(false)
   const columns = Object.entries(columnsOf(input))
   const word = rowWord(input)
-  const isLine = input.kind === 'runs'
   const isUsed = ([name, cell]: [string, Cell]) =>
     !cell.optional ||
     rows.some((row, i) => says(cell, row[name]!) || errors[pathOf(input, path, i, name)] !== undefined)
@@ -52,29 +48,8 @@ export function RowTable(props: RowTableProps) {
   /** The row that was last in hand: a figure from a table goes there. */
   const [inHand, setInHand] = useState(0)
   const target = Math.min(inHand, rows.length - 1)
-  const unitIn = (cell: ScalarCell, field: FieldText) => (isLine ? unitOfLine(cell, field) : unitOf(cell, field))
-
-  const cellAt = (row: RowTexts, i: number, name: string, cell: Cell, isDetail = false) => {
-    const at = pathOf(input, path, i, name)
-    const field = row[name]!
-    const unit = cell.kind === 'scalar' ? unitIn(cell, field) : ''
-    return (
-      <TableCell
-        id={idOf(at)}
-        cell={cell}
-        field={field}
-        isWrong={errors[at] !== undefined}
-        unit={unit}
-        isOwn={isDetail || (cell.kind === 'scalar' && first !== undefined && unit !== unitIn(cell, first[name]!))}
-        isLine={isLine}
-        onText={(text) => change({ do: 'write', path: at, text })}
-        onFocus={() => setInHand(i)}
-        onPaste={(event) => onPaste(event, i, name)}
-        onKeyDown={(event) => onMove(event, i, name)}
-      />
-    )
-  }
-  const ofRow = (i: number) => <span className="out-of-sight">, {`${word} ${i + 1}`}</span>
+  const hidden = (asked ? [] : spare).map(([name]) => name).join('|')
+  const units = columns.map(([name, cell]) => (first ? unitIn(input, cell, first[name]!) : '')).join('|')
 
   if (!first) return null
   return (
@@ -89,7 +64,7 @@ export function RowTable(props: RowTableProps) {
               <th key={name} scope="col">
                 {cell.label} <CellSymbol cell={cell} />
                 {cell.kind === 'scalar' && (
-                  <ColumnUnit {...{ cell, name, path, change }} unit={unitIn(cell, first[name]!)} />
+                  <ColumnUnit {...{ cell, name, path, change }} unit={unitIn(input, cell, first[name]!)} />
                 )}
               </th>
             ))}
@@ -102,60 +77,15 @@ export function RowTable(props: RowTableProps) {
           </tr>
         </thead>
         <tbody>
-          {rows.map((row, i) => {
-            const own = Object.entries(columnsOfRow(input, row)).filter(([, { when }]) => when !== undefined)
-            const wrong = [...shown, ...own].flatMap(([name, { label }]) => {
-              const at = pathOf(input, path, i, name)
-              const message = errors[at]
-              if (message === undefined) return []
-              return [{ at, message: name === '' || message.startsWith(label) ? message : `${label}: ${message}` }]
-            })
-            return (
-              <RowOf key={i} wrong={wrong} idOf={idOf} width={shown.length + 3}>
-                <th scope="row">
-                  <span className="row-word">{capital(word)} </span>
-                  {i + 1}
-                </th>
-                {shown.map(([name, cell]) => (
-                  <td key={name}>
-                    <label htmlFor={idOf(pathOf(input, path, i, name))}>
-                      {name === '' ? `${capital(word)} ${i + 1}` : cell.label}
-                      {name !== '' && ofRow(i)}
-                    </label>
-                    {cellAt(row, i, name, cell)}
-                  </td>
-                ))}
-                {details.length > 0 && (
-                  <td className="details">
-                    <div>
-                      {own.map(([name, cell]) => (
-                        <span key={name} className="detail">
-                          <label htmlFor={idOf(pathOf(input, path, i, name))}>
-                            {cell.label}
-                            {ofRow(i)} <CellSymbol cell={cell} />
-                          </label>
-                          {cellAt(row, i, name, cell, true)}
-                        </span>
-                      ))}
-                    </div>
-                  </td>
-                )}
-                {mayLose && (
-                  <td className="no-print">
-                    <button
-                      type="button"
-                      className="plain-button take-out"
-                      aria-label={`Take out ${word} ${i + 1}`}
-                      onClick={() => onRemove(i)}
-                    >
-                      <span className="take-out-sign">×</span>
-                      <span className="take-out-words">Take out</span>
-                    </button>
-                  </td>
-                )}
-              </RowOf>
-            )
-          })}
+          {rows.map((row, i) => (
+            <TableRow
+              key={i}
+              {...{ path, input, row, hidden, units, idOf, change, mayLose, onRemove, onPaste, onMove }}
+              number={i}
+              errors={errorsUnder(errors, `${path}.${i}`)}
+              onFocus={setInHand}
+            />
+          ))}
         </tbody>
       </table>
       {input.kind === 'rows' && (
@@ -179,14 +109,6 @@ export function RowTable(props: RowTableProps) {
         </button>
       )}
     </>
-  )
-}
-
-function CellSymbol({ cell }: { cell: Cell }) {
-  return cell.symbol === undefined ? null : (
-    <span className="field-symbol" aria-hidden="true">
-      <MathSymbol tex={cell.symbol} />
-    </span>
   )
 }
 
@@ -223,31 +145,4 @@ function ColumnHelp({ cells }: { cells: readonly Cell[] }) {
     return help === undefined ? [] : [`${cell.label}: ${help}.`]
   })
   return helped.length === 0 ? null : <p className="field-help column-help">{helped.join(' ')}</p>
-}
-
-interface RowOfProps {
-  wrong: readonly { at: string; message: string }[]
-  idOf: (path: string) => string
-  width: number
-  children: ReactNode
-}
-
-/** A row, and below it what to write instead. */
-function RowOf({ wrong, idOf, width, children }: RowOfProps) {
-  return (
-    <>
-      <tr>{children}</tr>
-      {wrong.length > 0 && (
-        <tr className="row-errors">
-          <td colSpan={width}>
-            {wrong.map(({ at, message }) => (
-              <p className="field-error" id={`${idOf(at)}-error`} key={at}>
-                {message}
-              </p>
-            ))}
-          </td>
-        </tr>
-      )}
-    </>
-  )
 }

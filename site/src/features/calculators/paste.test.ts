@@ -9,7 +9,7 @@ import { blockOf, pasteBlock } from './paste.ts'
 
 const pasted = (definition: CalculatorDefinition, key: string, text: string, row = 0, column = '') => {
   const form = startForm(definition)
-  const block = pasteBlock(form, definition.inputs[key] as ListInput, { key, row, column }, text)
+  const block = pasteBlock(form.rows[key]!, definition.inputs[key] as ListInput, { row, column }, text)
   if (!block) return undefined
   const next = { ...form, rows: { ...form.rows, [key]: block.rows } }
   return { say: block.say, value: readForm(definition, next).inputs[key], errors: readForm(definition, next).errors }

@@ -3,7 +3,7 @@ import { parse } from '#calc/units/parse.ts'
 import { choiceWords } from './CellField.tsx'
 import { capital, columnsOf, columnsOfRow, rowWord, type ListInput } from './columns.ts'
 import { offeredName } from './field-text.ts'
-import { emptyRow, type Form, type RowTexts } from './form.ts'
+import { emptyRow, type RowTexts } from './form.ts'
 
 /** The cells of a block that was copied from a spreadsheet or a notebook: rows by lines, cells by tabs, else semicolons, else commas. */
 export const blockOf = (text: string, columns: number): string[][] => {
@@ -39,9 +39,8 @@ const unitInHeading = (cell: Cell, heading: string): string | undefined => {
   return reading.ok ? offeredName(cell, reading.unit) : undefined
 }
 
-/** Where a block goes: the key of the list, the row and the column (by its place among those shown) of the field it was pasted into. */
+/** Where a block goes: the row and the column (by its place among those shown) of the field it was pasted into. */
 export interface Place {
-  key: string
   row: number
   column: string
 }
@@ -53,7 +52,12 @@ export interface Pasted {
 }
 
 /** The list with a block written over it from one field on, new rows added; undefined for a text that is one cell, which any field takes. */
-export const pasteBlock = (form: Form, input: ListInput, place: Place, text: string): Pasted | undefined => {
+export const pasteBlock = (
+  before: readonly RowTexts[],
+  input: ListInput,
+  place: Place,
+  text: string,
+): Pasted | undefined => {
   const columns = columnsOf(input)
   const names = Object.keys(columns)
   const block = blockOf(text, input.kind === 'runs' ? 1 : names.length)
@@ -62,17 +66,17 @@ export const pasteBlock = (form: Form, input: ListInput, place: Place, text: str
   const cells = heading ? block.slice(1) : block
   const { rows, say } =
     input.kind === 'runs'
-      ? pasteRuns(form, input, place, cells, heading)
-      : pasteCells(form, input, place, cells, heading)
+      ? pasteRuns(before, input, place, cells, heading)
+      : pasteCells(before, input, place, cells, heading)
   return { rows, say: heading ? `${say} The first line was taken for a heading.` : say }
 }
 
 const counted = (count: number, word: string) => `${count} ${word}${count === 1 ? '' : 's'}`
 
 const pasteCells = (
-  form: Form,
+  before: readonly RowTexts[],
   input: Exclude<ListInput, { kind: 'runs' }>,
-  { key, row, column }: Place,
+  { row, column }: Place,
   block: readonly (readonly string[])[],
   heading: readonly string[] | undefined,
 ): Pasted => {
@@ -81,7 +85,7 @@ const pasteCells = (
   const from = names.indexOf(column)
   // One line of numbers in a list of one column goes down it.
   const cells = names.length === 1 && block.length === 1 ? block[0]!.map((text) => [text]) : block
-  const rows = [...form.rows[key]!]
+  const rows = [...before]
   const room = input.most - row
   const taken = cells.slice(0, room)
   for (const [i, texts] of taken.entries()) {
@@ -108,20 +112,20 @@ const pasteCells = (
 
 /** Each column of the block is a run, as a field book has them side by side; a block of one line is one run. */
 const pasteRuns = (
-  form: Form,
+  before: readonly RowTexts[],
   input: Extract<ListInput, { kind: 'runs' }>,
-  { key, row }: Place,
+  { row }: Place,
   block: readonly (readonly string[])[],
   heading: readonly string[] | undefined,
 ): Pasted => {
   const cells = block.length === 1 ? block[0]!.map((text) => [text]) : block
-  const rows = [...form.rows[key]!]
+  const rows = [...before]
   const count = Math.max(...cells.map((texts) => texts.length))
   const room = input.most - row
   for (let i = 0; i < Math.min(count, room); i++) {
     const line = cells.map((texts) => texts[i] ?? '').filter((text) => text !== '')
-    const before = rows[row + i] ?? emptyRow(input, rows.at(-1))
-    const unit = unitInHeading(columnsOf(input)['']!, heading?.[i] ?? '') ?? before['']!.unit
+    const old = rows[row + i] ?? emptyRow(input, rows.at(-1))
+    const unit = unitInHeading(columnsOf(input)['']!, heading?.[i] ?? '') ?? old['']!.unit
     rows[row + i] = { '': { unit, text: line.join('  ') } }
   }
   const lost = count > room ? [`${counted(count - room, input.run)} did not fit: there may be ${input.most}`] : []
