@@ -122,13 +122,20 @@ const cellsOf = ({ inputs }: CalculatorDefinition, values: Inputs) => {
   const cells: {
     field: string
     cell: Pick<Cell & { kind: 'scalar' }, 'range' | 'whole'> | undefined
+    isFree: boolean
     put: (value: unknown) => object
   }[] = []
   const add = (
     field: string,
     cell: Cell | { kind: 'series' | 'runs'; range: readonly [number, number] },
     put: (value: unknown) => object,
-  ) => cells.push({ field, cell: cell.kind === 'choice' ? undefined : cell, put })
+  ) =>
+    cells.push({
+      field,
+      cell: cell.kind === 'choice' ? undefined : cell,
+      isFree: cell.kind === 'choice' && cell.free === true,
+      put,
+    })
   for (const [key, value] of Object.entries(values)) {
     const input = inputs[key]!
     if (input.kind === 'scalar' || input.kind === 'choice') add(key, input, (put) => ({ ...values, [key]: put }))
@@ -260,9 +267,9 @@ describe.each(definitions.map((definition) => [definition.id, definition] as con
   })
 
   test('refuses what is no number, and numbers out of range', () => {
-    for (const { field, cell, put } of shapes.flatMap((values) => cellsOf(definition, values))) {
+    for (const { field, cell, isFree, put } of shapes.flatMap((values) => cellsOf(definition, values))) {
       if (!cell) {
-        for (const bad of ['nonsense', 1, null, 'constructor'])
+        for (const bad of isFree ? ['', ' ', 1, null, 'x'.repeat(81)] : ['nonsense', 1, null, 'constructor'])
           expectRefusal('out-of-range', field, () => calculate(id, put(bad)))
         continue
       }

@@ -36,6 +36,14 @@ import { dumpLoad } from './electrical/dump-load.ts'
 import { openChannel } from './leat/open-channel.ts'
 import { screen } from './leat/screen.ts'
 import { submergence } from './leat/submergence.ts'
+import { bucket } from './jet/bucket.ts'
+import { needle } from './jet/needle.ts'
+import { nozzleSet } from './jet/nozzle-set.ts'
+import { bestPowerFlow } from './pipe/best-power-flow.ts'
+import { economicDiameter } from './pipe/economic-diameter.ts'
+import { hazenWilliams } from './pipe/hazen-williams.ts'
+import { pipeProfile } from './pipe/pipe-profile.ts'
+import { pipeChoice } from './pipe/pipe-choice.ts'
 import { water } from './water/water.ts'
 
 /** Every calculator by its id, in the order of the water. */
@@ -59,8 +67,13 @@ export const calculators = {
   'settling-basin': settlingBasin,
   spillway,
   friction,
+  'hazen-williams': hazenWilliams,
   fittings,
   penstock,
+  'pipe-profile': pipeProfile,
+  'pipe-choice': pipeChoice,
+  'economic-diameter': economicDiameter,
+  'best-power-flow': bestPowerFlow,
   'pressure-class': pressureClass,
   'hoop-stress': hoopStress,
   surge,
@@ -72,7 +85,10 @@ export const calculators = {
   'fill-and-vent': fillAndVent,
   'pipe-movement': pipeMovement,
   jet,
+  'nozzle-set': nozzleSet,
+  needle,
   runner,
+  bucket,
   'belt-drive': beltDrive,
   alternator,
   cable,

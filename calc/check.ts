@@ -16,8 +16,19 @@ import { say } from './units/format.ts'
 const between = (cell: Scalar): string =>
   `between ${say(cell.range[0], cell.quantity, cell.unit)} and ${say(cell.range[1], cell.quantity, cell.unit)}`
 
+/** Of words that may be any. */
+export const longestWords = 80
+
 const checkCell = (cell: Cell, field: string, value: unknown): PlainValue => {
   if (cell.kind === 'choice') {
+    if (cell.free) {
+      if (typeof value === 'string' && value.trim() !== '' && value.length <= longestWords) return value
+      throw new CalculationError(
+        'out-of-range',
+        field,
+        `${cell.label}: write a few words, ${longestWords} letters at most.`,
+      )
+    }
     if (typeof value === 'string' && cell.of.includes(value)) return value
     throw new CalculationError('out-of-range', field, `${cell.label}: choose one of ${cell.of.join(', ')}.`)
   }

@@ -111,6 +111,8 @@ export type Choice<V extends string = string> = Said &
   Absence & {
     kind: 'choice'
     of: readonly V[]
+    /** Any words will do, such as the name of a pipe; `of` are suggestions. */
+    free?: true
     /** Words for the choices, where the value itself does not read well. */
     words?: Readonly<Record<V, string>>
     initial?: V
@@ -198,7 +200,11 @@ interface RowsOutput extends Said {
 export type Output = ScalarOutput | TextOutput | RowsOutput
 
 type Spread<T> = { [K in keyof T]: T[K] }
-type CellValue<C> = C extends { kind: 'choice'; of: readonly (infer V)[] } ? V : number
+type CellValue<C> = C extends { kind: 'choice'; free: true }
+  ? string
+  : C extends { kind: 'choice'; of: readonly (infer V)[] }
+    ? V
+    : number
 type MayMiss<I> = I extends { fallback: number | string }
   ? false
   : I extends { optional: true } | { or: string } | { goesWith: string } | { needs: string } | { when: object }

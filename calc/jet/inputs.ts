@@ -21,3 +21,23 @@ export const velocityCoefficient = {
   range: [0.9, 1],
   usual: [0.95, 0.99],
 } as const satisfies Scalar
+
+/** Of a nozzle, for the flow that it passes. */
+export const dischargeCoefficient = {
+  kind: 'scalar',
+  symbol: 'C_d',
+  label: 'Discharge coefficient',
+  quantity: 'ratio',
+  help: 'velocity coefficient times contraction coefficient; a hole in a flat plate about 0.6',
+  range: [0.3, 1],
+  usual: [0.59, 0.99],
+} as const satisfies Scalar
+
+/** The bore at a nozzle's mouth. */
+export const nozzleDiameter = {
+  kind: 'scalar',
+  symbol: 'd_n',
+  label: 'Nozzle diameter',
+  quantity: 'length',
+  range: [0.001, 1],
+} as const satisfies Scalar

@@ -2,7 +2,7 @@ import { g, gravity } from '../constants.ts'
 import { defineCalculator } from '../definition.ts'
 import { waterTemperature } from '../water/inputs.ts'
 import { waterDensity } from '../water/properties.ts'
-import { netHead, velocityCoefficient } from './inputs.ts'
+import { netHead, nozzleDiameter, velocityCoefficient } from './inputs.ts'
 
 /** Common practice, no source. */
 const thickJet = 0.15
@@ -46,15 +46,7 @@ export const jet = defineCalculator({
       initial: 0.0095,
       or: 'nozzleDiameter',
     },
-    nozzleDiameter: {
-      kind: 'scalar',
-      symbol: 'd_n',
-      label: 'Nozzle diameter',
-      quantity: 'length',
-      help: 'the bore at its mouth',
-      range: [0.001, 1],
-      or: 'flow',
-    },
+    nozzleDiameter: { ...nozzleDiameter, help: 'the bore at its mouth', or: 'flow' },
     waterTemperature,
   },
   outputs: {

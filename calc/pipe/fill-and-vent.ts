@@ -1,8 +1,8 @@
 import { defineCalculator } from '../definition.ts'
 import { format, join } from '../units/format.ts'
+import { seaLevelPressure as atmosphere } from '../water/atmosphere.ts'
 
-/** Outside air at sea level, 15 °C: ISO 2533. */
-const atmosphere = 101_325
+/** Of outside air at sea level, 15 °C: ISO 2533. */
 const airDensity = 1.225
 /** Ratio of the specific heats of air. */
 const gamma = 1.4

@@ -1,10 +1,9 @@
 import { gravity } from '../constants.ts'
 import { defineCalculator } from '../definition.ts'
-import { CalculationError } from '../errors.ts'
 import { waterTemperature } from '../water/inputs.ts'
 import { waterKinematicViscosity } from '../water/properties.ts'
 import { laminarTo, pipeLoss, regimeOf, turbulentFrom } from './friction-factor.ts'
-import { flow, insideDiameter, pipeLength, roughness } from './inputs.ts'
+import { checkRoughness, flow, insideDiameter, pipeLength, roughness } from './inputs.ts'
 
 /** Relative roughness to which Colebrook and White's formula is drawn in L. F. Moody, Trans. ASME 66 (1944). */
 const roughestDrawn = 0.05
@@ -51,12 +50,7 @@ export const friction = defineCalculator({
   },
   solve(given) {
     const { flow, insideDiameter, length, roughness, waterTemperature } = given
-    if (roughness >= insideDiameter / 2)
-      throw new CalculationError(
-        'inconsistent',
-        'roughness',
-        'A roughness of half the inside diameter leaves no pipe. Give the height of the grains on the wall, such as 0.05 mm.',
-      )
+    checkRoughness(roughness, insideDiameter)
     const viscosity = waterKinematicViscosity(waterTemperature)
     const pipe = { insideDiameter, length, roughness }
     const { velocity, reynolds, frictionFactor, headLoss } = pipeLoss(flow, pipe, viscosity)

@@ -8,6 +8,9 @@ export interface ProfilePoint {
   elevation: number
 }
 
+/** What the sum of the sections' lengths may be off by rounding. */
+const rounding = 1e-9
+
 /** Throws where a profile does not start at the intake, goes back, or passes the pipe's end. */
 export const checkProfile = (profile: readonly ProfilePoint[], pipeLength: number): void =>
   profile.forEach(({ distance }, i) => {
@@ -17,7 +20,7 @@ export const checkProfile = (profile: readonly ProfilePoint[], pipeLength: numbe
     if (i === 0 && distance !== 0) refuse('The profile starts at the intake: give its first point the distance 0 m.')
     if (i > 0 && !(distance > profile[i - 1]!.distance))
       refuse(`Point ${i + 1} of the profile must lie further down the pipe than the one before it.`)
-    if (distance > pipeLength * (1 + 1e-9))
+    if (distance > pipeLength * (1 + rounding))
       refuse(
         `Point ${i + 1} of the profile lies past the end of the pipe, which is ${say(pipeLength, 'length', 'm')} long.`,
       )
@@ -25,7 +28,7 @@ export const checkProfile = (profile: readonly ProfilePoint[], pipeLength: numbe
 
 /** Elevation at a distance, linear between the points of the profile; undefined past its last one. */
 const elevationAt = (profile: readonly ProfilePoint[], distance: number): number | undefined => {
-  const i = profile.findIndex((point) => point.distance >= distance)
+  const i = profile.findIndex((point) => point.distance >= distance * (1 - rounding))
   if (i < 0) return undefined
   const to = profile[i]!
   if (i === 0) return to.elevation

@@ -2,12 +2,13 @@ import { g, gravity } from '../constants.ts'
 import { defineCalculator } from '../definition.ts'
 import { CalculationError } from '../errors.ts'
 import type { Aside, Formula } from '../formula.ts'
+import { dischargeCoefficient, nozzleDiameter } from '../jet/inputs.ts'
 import { format, join, say } from '../units/format.ts'
 import { waterTemperature } from '../water/inputs.ts'
 import { waterDensity, waterKinematicViscosity } from '../water/properties.ts'
 import { laminarTo, turbulentFrom, velocityHead } from './friction-factor.ts'
 import { usualVelocity } from './friction.ts'
-import { flow } from './inputs.ts'
+import { flow, grossHead, profile } from './inputs.ts'
 import { flowThroughNozzles, sectionLoss } from './penstock-flow.ts'
 import { checkProfile, gradeLineOf } from './penstock-profile.ts'
 import { checkSections, sections } from './penstock-sections.ts'
@@ -32,16 +33,7 @@ export const penstock = defineCalculator({
   summary: 'What the pipe takes from the gross head, what it leaves at the nozzle, and the grade line on the way.',
   hazards: ['pressure'],
   inputs: {
-    grossHead: {
-      kind: 'scalar',
-      symbol: 'H_g',
-      label: 'Gross head',
-      quantity: 'head',
-      help: 'from the water at the intake to the jet’s centre line',
-      range: [0.1, 2000],
-      usual: [5, 500],
-      initial: 48,
-    },
+    grossHead: { ...grossHead, initial: 48 },
     sections,
     flow: { ...flow, initial: 0.0095, or: 'nozzles' },
     nozzles: {
@@ -50,43 +42,18 @@ export const penstock = defineCalculator({
       help: 'like nozzles at the foot of the pipe',
       columns: {
         count: { kind: 'scalar', symbol: 'n', label: 'Nozzles', quantity: 'count', range: [1, 12], whole: true },
-        diameter: { kind: 'scalar', symbol: 'd_n', label: 'Nozzle diameter', quantity: 'length', range: [0.001, 1] },
-        dischargeCoefficient: {
-          kind: 'scalar',
-          symbol: 'C_d',
-          label: 'Discharge coefficient',
-          quantity: 'ratio',
-          help: 'velocity coefficient times contraction coefficient; a hole in a flat plate about 0.6',
-          range: [0.3, 1],
-          usual: [0.59, 0.99],
-        },
+        diameter: nozzleDiameter,
+        dischargeCoefficient,
       },
       or: 'flow',
     },
     profile: {
-      kind: 'rows',
-      label: 'Profile of the pipe',
-      row: 'point',
+      ...profile,
       help: 'from the intake down: distance along the pipe and height of the pipe above the nozzle',
       columns: {
-        distance: {
-          kind: 'scalar',
-          symbol: 's',
-          label: 'Distance',
-          quantity: 'length',
-          range: [0, 200_000],
-          unit: 'm',
-        },
-        elevation: {
-          kind: 'scalar',
-          symbol: 'z',
-          label: 'Height above the nozzle',
-          quantity: 'head',
-          range: [-2000, 2000],
-        },
+        distance: profile.columns.distance,
+        elevation: { ...profile.columns.elevation, label: 'Height above the nozzle' },
       },
-      least: 2,
-      most: 500,
       optional: true,
     },
     waterTemperature,

@@ -1,12 +1,11 @@
 import { g, gravity } from '../constants.ts'
 import { defineCalculator } from '../definition.ts'
 import { format, join } from '../units/format.ts'
+import { seaLevelPressure } from '../water/atmosphere.ts'
 import { waterTemperature } from '../water/inputs.ts'
 import { vapourPressure, waterDensity } from '../water/properties.ts'
 import { insideDiameter, pipeLength } from './inputs.ts'
 
-/** Air at sea level: ISO 2533. */
-const atmosphere = 101_325
 /** Above this closure parameter the steady rise that Michaud's rule supposes is not what a valve makes. */
 const steadyRiseTo = 2
 /** What every surge has. */
@@ -237,7 +236,7 @@ export const surge = defineCalculator({
   },
   cautions({ pipeModulus, waterTemperature }, { worstSurge, minimumPressure, closureParameter, rapid }) {
     const worst = join(format(worstSurge, 'pressure'))
-    const parted = minimumPressure < vapourPressure(waterTemperature) - atmosphere
+    const parted = minimumPressure < vapourPressure(waterTemperature) - seaLevelPressure
     return [
       {
         level: 'check',

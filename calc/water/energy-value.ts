@@ -1,12 +1,6 @@
 import { joulesPerKilowattHour } from '../constants.ts'
 import { defineCalculator } from '../definition.ts'
-
-/**
- * What one unit of money at each year's end for so many years is worth today: (1 − (1 + r)⁻ⁿ)/r, and n itself without interest. Written so
- * that a rate close to nothing loses no digits.
- */
-const presentWorthOfYearly = (rate: number, years: number): number =>
-  rate === 0 ? years : -Math.expm1(-years * Math.log1p(rate)) / rate
+import { discountRate, lifeYears, presentWorthOfYearly, price } from './worth-of-money.ts'
 
 /**
  * What a year's energy is worth, and whether it pays for the plant: yearly value E·c, simple payback, net present value, levelised cost of a
@@ -31,15 +25,7 @@ export const energyValue = defineCalculator({
       usual: [1e9, 1e13],
       initial: 5.04e10,
     },
-    price: {
-      kind: 'scalar',
-      symbol: 'c',
-      label: 'Price of a kilowatt-hour',
-      quantity: 'pricePerKwh',
-      help: 'what you would pay for it otherwise, or what you are paid',
-      range: [0, 1e6],
-      initial: 0.24,
-    },
+    price,
     capitalCost: {
       kind: 'scalar',
       symbol: 'K',
@@ -58,26 +44,8 @@ export const energyValue = defineCalculator({
       range: [0, 1e12],
       initial: 420,
     },
-    lifeYears: {
-      kind: 'scalar',
-      symbol: 'n',
-      label: 'Years counted',
-      quantity: 'years',
-      range: [1, 200],
-      usual: [5, 60],
-      whole: true,
-      initial: 25,
-    },
-    discountRate: {
-      kind: 'scalar',
-      symbol: 'i',
-      label: 'Discount rate',
-      quantity: 'fraction',
-      help: 'what the money would bring elsewhere, less inflation where prices are today’s',
-      range: [0, 1],
-      usual: [0, 0.15],
-      initial: 0.05,
-    },
+    lifeYears,
+    discountRate,
   },
   outputs: {
     yearlyValue: { kind: 'scalar', symbol: 'V', label: 'Value of a year', quantity: 'money' },

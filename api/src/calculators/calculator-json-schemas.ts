@@ -7,6 +7,7 @@ import {
   type Input,
   type Output,
 } from '#calc/index.ts'
+import { longestWords } from '#calc/check.ts'
 import { numberOf } from '#calc/definition.ts'
 import { quantities } from '#calc/units/quantities.ts'
 
@@ -16,22 +17,24 @@ type SchemaObject = Exclude<Schemas[string], { $ref: string }>
 const words = (...parts: readonly (string | undefined)[]) => parts.filter(Boolean).join('; ')
 
 const ofCell = (cell: Cell): SchemaObject =>
-  cell.kind === 'choice'
-    ? {
-        type: 'string',
-        enum: [...cell.of],
-        description: words(cell.label, cell.help),
-        ...(cell.initial === undefined ? {} : { example: cell.initial }),
-        ...(cell.fallback === undefined ? {} : { default: cell.fallback }),
-      }
-    : {
-        type: cell.whole ? 'integer' : 'number',
-        minimum: cell.range[0],
-        maximum: cell.range[1],
-        description: words(cell.label, quantities[cell.quantity].si.name, cell.help),
-        ...(cell.initial === undefined ? {} : { example: cell.initial }),
-        ...(cell.fallback === undefined ? {} : { default: cell.fallback }),
-      }
+  cell.kind === 'choice' && cell.free
+    ? { type: 'string', minLength: 1, maxLength: longestWords, description: cell.label }
+    : cell.kind === 'choice'
+      ? {
+          type: 'string',
+          enum: [...cell.of],
+          description: words(cell.label, cell.help),
+          ...(cell.initial === undefined ? {} : { example: cell.initial }),
+          ...(cell.fallback === undefined ? {} : { default: cell.fallback }),
+        }
+      : {
+          type: cell.whole ? 'integer' : 'number',
+          minimum: cell.range[0],
+          maximum: cell.range[1],
+          description: words(cell.label, quantities[cell.quantity].si.name, cell.help),
+          ...(cell.initial === undefined ? {} : { example: cell.initial }),
+          ...(cell.fallback === undefined ? {} : { default: cell.fallback }),
+        }
 
 const hasFallback = (input: Input | Cell) => 'fallback' in input && input.fallback !== undefined
 

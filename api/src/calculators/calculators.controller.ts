@@ -15,6 +15,7 @@ import {
   type SolveBatch,
   type SolveRequest,
 } from './dto/calculator.schema.ts'
+import { schemeRequestSchema, schemeSolutionSchema, type SchemeRequest } from './dto/scheme.schema.ts'
 
 const ids = Object.keys(calculators)
 // The same, and for the contract's page what each calculator takes and gives.
@@ -49,6 +50,12 @@ export class CalculatorsController {
   @Answers(solutions)
   solveAll(@Body({ schema: batch }) { items }: SolveBatch) {
     return new StreamableFile(this.service.solveAll(items), { type: 'application/json; charset=utf-8' })
+  }
+
+  @Post('scheme/solve')
+  @Answers(schemeSolutionSchema)
+  solveScheme(@Body({ schema: schemeRequestSchema }) request: SchemeRequest) {
+    return this.service.solveScheme(request)
   }
 
   @Get(':id')

@@ -7,13 +7,17 @@ import {
   calculator,
   calculators,
   type CalculatorDefinition,
+  type SchemeInputs,
+  schemeUncertainty,
   solve,
+  solveScheme,
   type Solution,
 } from '#calc/index.ts'
 import type { ErrorBody } from '../common/dto/error.schema.ts'
 import { fieldsOf } from '../common/pipes/request-validation.pipe.ts'
 import { broken, Refusal } from '../common/refusal.ts'
 import { solutionSchema, solveItemSchema, type Trouble } from './dto/calculator.schema.ts'
+import type { SchemeRequest } from './dto/scheme.schema.ts'
 
 type SolvedItem = z.infer<typeof solutionSchema> | { error: Trouble }
 
@@ -39,13 +43,17 @@ export class CalculatorsService {
 
   solve(id: string, inputs: unknown): Solution {
     const { id: known } = this.one(id)
-    try {
-      return solve(known, inputs)
-    } catch (error) {
-      if (!(error instanceof CalculationError)) throw error
-      const { code, field, message } = error
-      throw new Refusal(code, message, [{ field, code, message }])
-    }
+    return refusing(() => solve(known, inputs))
+  }
+
+  solveScheme({ inputs, standardUncertainties }: SchemeRequest) {
+    return refusing(() => {
+      const scheme = (inputs ?? {}) as SchemeInputs
+      const solution = solveScheme(scheme)
+      return standardUncertainties === undefined
+        ? solution
+        : { ...solution, uncertainties: schemeUncertainty(scheme, standardUncertainties) }
+    })
   }
 
   /** The answer piece by piece, as JSON: a thousand workings in one text would keep everybody else waiting while it is made. */
@@ -81,6 +89,17 @@ export class CalculatorsService {
       const { code, message, fields } = refusal.getResponse() as ErrorBody
       return { error: fields[0] ?? { field: 'id', code, message } }
     }
+  }
+}
+
+/** What the library refuses is the asker's to mend. */
+function refusing<T>(calculation: () => T): T {
+  try {
+    return calculation()
+  } catch (error) {
+    if (!(error instanceof CalculationError)) throw error
+    const { code, field, message } = error
+    throw new Refusal(code, message, [{ field, code, message }])
   }
 }
 

@@ -12,21 +12,21 @@ export const solveItemSchema = z.strictObject({ id: z.string(), inputs })
 export const solveBatchSchema = z.object({ items: z.array(z.unknown()) })
 export type SolveBatch = z.infer<typeof solveBatchSchema>
 
-const plainRow = z.record(z.string(), z.union([z.number(), z.string()]).optional())
-const outputs = z.record(z.string(), z.union([z.number(), z.string(), z.array(plainRow)]).optional())
+export const plainRowSchema = z.record(z.string(), z.union([z.number(), z.string()]).optional())
+export const outputsSchema = z.record(z.string(), z.union([z.number(), z.string(), z.array(plainRowSchema)]).optional())
+
+export const cautionSchema = z.object({
+  level: z.enum(['note', 'check', 'stop']),
+  about: z.array(z.string()),
+  hazard: z.string().optional(),
+  say: z.string(),
+})
 
 export const solutionSchema = z.object({
   /** SI, under the keys of the calculator's outputs; what cannot be worked out is absent. */
-  outputs,
+  outputs: outputsSchema,
   working: z.array(printedStepSchema),
-  cautions: z.array(
-    z.object({
-      level: z.enum(['note', 'check', 'stop']),
-      about: z.array(z.string()),
-      hazard: z.string().optional(),
-      say: z.string(),
-    }),
-  ),
+  cautions: z.array(cautionSchema),
 })
 
 export const troubleSchema = z.object({ field: z.string(), code: z.string(), message: z.string() })

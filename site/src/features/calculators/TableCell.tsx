@@ -29,6 +29,12 @@ export function TableCell({ id, cell, field, isWrong, unit, isOwn, isLine, onTex
     'aria-describedby': isWrong ? `${id}-error` : undefined,
     ...handlers,
   } as const
+  if (cell.kind === 'choice' && cell.free)
+    return (
+      <span className={isWrong ? 'cell cell-wrong' : 'cell'}>
+        <input {...common} size={1} autoComplete="off" onChange={(event) => onText(event.target.value)} />
+      </span>
+    )
   if (cell.kind === 'choice')
     return (
       <span className={isWrong ? 'cell cell-wrong' : 'cell'}>

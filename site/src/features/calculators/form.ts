@@ -61,7 +61,7 @@ export const emptyRow = (input: ListInput, like?: RowTexts): RowTexts =>
     Object.entries(columnsOf(input)).map(([name, cell]) => [
       name,
       {
-        text: cell.kind === 'choice' ? (cell.optional ? '' : cell.of[0]!) : '',
+        text: cell.kind === 'choice' && !cell.optional && !cell.free ? cell.of[0]! : '',
         unit: like?.[name]?.unit ?? startText(cell, undefined).unit,
       },
     ]),

@@ -20,7 +20,12 @@ export function givenValues(
 ): GivenValue[] {
   const value = (label: string, cell: Cell, path: string, field: FieldText): GivenValue[] => {
     if (field.text === '' || (cell.optional && !isTold(path))) return []
-    const text = cell.kind === 'choice' ? (cell.words?.[field.text] ?? field.text.replaceAll('-', ' ')) : written(field)
+    const text =
+      cell.kind !== 'choice'
+        ? written(field)
+        : cell.free
+          ? field.text
+          : (cell.words?.[field.text] ?? field.text.replaceAll('-', ' '))
     return [{ label, text }]
   }
   return shownKeys(definition, form).flatMap((key) => {
