@@ -143,15 +143,17 @@ describe('checking', () => {
   })
 
   test('a list with holes is one with something missing', () => {
-    const holed = (first: number, last: number) => {
-      const list: number[] = [first]
-      list[2] = last
-      return list
+    const holed = <T>(...list: T[]): T[] => {
+      const holes = new Array<T>(list.length)
+      list.forEach((value, i) => {
+        if (i !== 1) holes[i] = value
+      })
+      return holes
     }
-    expectRefusal('not-finite', 'timings[1]', () => check({ ...good, timings: holed(1, 3) }))
+    expectRefusal('not-finite', 'timings[1]', () => check({ ...good, timings: holed(1, 2, 3) }))
     expectRefusal('not-finite', 'walls[1]', () => check({ ...good, walls: holed({ height: 1 }, { height: 1 }) }))
     expectRefusal('not-finite', 'levels[1]', () => check({ ...good, levels: holed([1], [2]) }))
-    expectRefusal('not-finite', 'levels[0]', () => check({ ...good, levels: [holed(1, 3)] }))
+    expectRefusal('not-finite', 'levels[0]', () => check({ ...good, levels: [holed(1, 2, 3)] }))
   })
 
   test('choices and whole numbers', () => {
