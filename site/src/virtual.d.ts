@@ -5,7 +5,5 @@ declare module 'virtual:calculator-index' {
   export const calculatorIndex: readonly import('./lib/calculator-index.ts').CalculatorIndexEntry[]
 }
 declare module 'virtual:calculator-loaders' {
-  export const loaders: Readonly<
-    Record<string, () => Promise<import('../../calc/definition.ts').CalculatorDefinition>>
-  >
+  export const loaders: Readonly<Record<string, () => Promise<import('../../calc/definition.ts').CalculatorDefinition>>>
 }
