@@ -49,6 +49,19 @@ test('the keys go down a column, and Enter adds a row at its end', async ({ page
   await expect(timings.getByRole('textbox')).toHaveCount(count)
 })
 
+test('a field book of levels is pasted with a run in each column', async ({ page }) => {
+  await page.goto('/calculators/head-by-levels')
+  const run = (number: number) => page.getByRole('textbox', { name: `Run ${number}`, exact: true })
+  await run(1).focus()
+  await paste(page, 'out\tback\n4,1\t4,0\n3,9\t4,1\n')
+  await expect(run(1)).toHaveValue('4,1  3,9')
+  await expect(run(2)).toHaveValue('4,0  4,1')
+  // The runs rise 8.0 and 8.1 m: 8.05 in the mean.
+  await expect(page.getByText('8.050 m').filter({ visible: true }).first()).toBeVisible()
+  await run(2).fill('4,0 4,x')
+  await expect(page.getByText(/^Rise 2/)).toBeVisible()
+})
+
 test('a fitting asks for what its kind has', async ({ page }) => {
   await page.goto('/calculators/fittings')
   const fittings = page.getByRole('group', { name: 'Fittings' })

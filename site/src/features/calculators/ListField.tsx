@@ -80,6 +80,8 @@ export function ListField(props: ManyProps<ListInput>) {
   const move = (event: KeyboardEvent, row: number, name: string) => {
     const by = event.key === 'Enter' || event.key === 'ArrowDown' ? 1 : event.key === 'ArrowUp' ? -1 : 0
     if (by === 0 || event.target instanceof HTMLSelectElement) return
+    // Within a run the arrows go from one of its lines to the other.
+    if (event.target instanceof HTMLTextAreaElement && event.key !== 'Enter') return
     if (row + by === rows.length && event.key === 'Enter' && !isFull) add(name)
     else if (!goTo(fieldId(row + by, name))) goTo(fieldId(row + by, names[0]!))
     event.preventDefault()

@@ -12,13 +12,16 @@ interface TableCellProps {
   /** The cell's own unit; `isOwn` where it differs from that of its column. */
   unit: string
   isOwn: boolean
-  /** Takes ± and the like; a run takes several numbers instead. */
+  /** Takes a line of numbers, as long as it may be. */
   isLine: boolean
   onText: (text: string) => void
   onFocus: () => void
   onPaste: (event: ClipboardEvent) => void
   onKeyDown: (event: KeyboardEvent) => void
 }
+
+/** About as many characters as stand beside each other in a list of runs, where the browser does not make a field as high as its text. */
+const lineLength = 26
 
 /** One cell of a list: a number as it is written, or a choice. */
 export function TableCell({ id, cell, field, isWrong, unit, isOwn, isLine, onText, ...handlers }: TableCellProps) {
@@ -47,17 +50,29 @@ export function TableCell({ id, cell, field, isWrong, unit, isOwn, isLine, onTex
         </select>
       </span>
     )
+  if (isLine)
+    return (
+      <span className={isWrong ? 'cell cell-wrong' : 'cell'}>
+        <textarea
+          {...common}
+          rows={Math.ceil(field.text.length / lineLength) || 1}
+          autoComplete="off"
+          spellCheck={false}
+          onChange={(event) => onText(event.target.value)}
+        />
+      </span>
+    )
   return (
     <span className={isWrong ? 'cell cell-wrong' : 'cell'}>
       <input
         {...common}
         size={1}
-        inputMode={cell.range[0] < 0 || isLine ? 'text' : 'decimal'}
+        inputMode={cell.range[0] < 0 ? 'text' : 'decimal'}
         autoComplete="off"
         spellCheck={false}
         onChange={(event) => onText(event.target.value)}
       />
-      {!cell.whole && !isLine && <PlusMinus fieldId={id} text={field.text} onText={onText} />}
+      {!cell.whole && <PlusMinus fieldId={id} text={field.text} onText={onText} />}
       {unit !== '' && <span className={isOwn ? 'cell-unit cell-unit-own' : 'cell-unit'}>{unit}</span>}
     </span>
   )

@@ -30,8 +30,12 @@ describe('a run of numbers', () => {
   })
 
   test('what cannot be read is told with its place', () => {
-    expect(read('1.42 1.3.8 0.96').error).toMatch(/^Rise 2, “1\.3\.8”: .*write it like/)
+    expect(read('1.42 1.3.8 0.96').error).toMatch(/^Rise 2: “1\.3\.8” .*write it like/)
     expect(read('1.42 1.38 ± 0.02').error).toMatch(/^Rise 2.*leave the ± out/)
+  })
+
+  test('may go down on the way', () => {
+    expect(read('1.42 -0.2 −0,1 0.96').values).toEqual([1.42, -0.2, -0.1, 0.96])
   })
 
   test('goes through an address with its unit', () => {

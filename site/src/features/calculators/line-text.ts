@@ -64,11 +64,14 @@ export const readLine = (cell: ScalarCell, row: string, field: FieldText): { val
   const unit = unitOfLine(cell, field)
   const values: number[] = []
   for (const [i, part] of parts(field.text).entries()) {
-    const said = `${capital(row)} ${i + 1}, “${part}”`
+    const said = `${capital(row)} ${i + 1}`
     if (/±|\+\s*\/\s*[-−]/.test(part))
       return { values, error: `${said}: leave the ± out; the spread of the ${row}s between the runs tells it.` }
     const reading = parse(part, cell.quantity, unit)
-    if (!reading.ok) return { values, error: `${said}: ${reading.message}` }
+    if (!reading.ok) {
+      const { message } = reading
+      return { values, error: message.includes(part) ? `${said}: ${message}` : `${said}, “${part}”: ${message}` }
+    }
     values.push(reading.value)
   }
   return { values }
