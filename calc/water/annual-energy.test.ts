@@ -133,6 +133,8 @@ describe('annual-energy', () => {
     ;[0.6, 0.6, 0.8, 1, 1].forEach((expected, i) => expectNear(shares[i], expected, { relative: 1e-9 }))
   })
 
+  /** Every fifth day: the properties are tried often. */
+  const fewDays = exampleYear.filter((_, day) => day % 5 === 0)
   const plants = fc.record({
     residualFlow: logUniform(1e-4, 0.02),
     designFlow: logUniform(1e-3, 0.1),
@@ -147,8 +149,8 @@ describe('annual-energy', () => {
   test('never more than the water, nor than a year at design flow', () => {
     fc.assert(
       fc.property(plants, (drawn) => {
-        const { energyPerYear, capacityFactor, runningFraction } = year({ ...drawn, dailyFlows: exampleYear })
-        const above = exampleYear.reduce((sum, flow) => sum + Math.max(0, flow - drawn.residualFlow), 0) / 365
+        const { energyPerYear, capacityFactor, runningFraction } = year({ ...drawn, dailyFlows: fewDays })
+        const above = fewDays.reduce((sum, flow) => sum + Math.max(0, flow - drawn.residualFlow), 0) / fewDays.length
         const water = waterDensity(10) * g * above * drawn.takeShare * drawn.grossHead * secondsPerYear
         expect(energyPerYear).toBeLessThanOrEqual(water * drawn.peakEfficiency * drawn.availability * (1 + 1e-12))
         expect(capacityFactor).toBeLessThanOrEqual(drawn.availability * (1 + 1e-12))
@@ -158,10 +160,10 @@ describe('annual-energy', () => {
       runs,
     )
   })
-  test('more head, a larger share and less residual flow never bring less', () => {
+  test('more head, less loss and a lower least flow never bring less', () => {
     fc.assert(
       fc.property(plants, (drawn) => {
-        const at = (change: object) => year({ ...drawn, dailyFlows: exampleYear, ...change }).energyPerYear
+        const at = (change: object) => year({ ...drawn, dailyFlows: fewDays, ...change }).energyPerYear
         const more = at({}) * (1 - 1e-12)
         expect(at({ grossHead: drawn.grossHead * 1.1 })).toBeGreaterThanOrEqual(more)
         expect(at({ lossAtDesign: drawn.lossAtDesign * 0.9 })).toBeGreaterThanOrEqual(more)

@@ -84,7 +84,7 @@ describe('flow-duration', () => {
     },
   )
 
-  const records = fc.array(logUniform(1e-5, 10), { minLength: 19, maxLength: 400 })
+  const records = fc.array(logUniform(1e-5, 10), { minLength: 19, maxLength: 150 })
   test('neither the order of the days nor their unit changes the curve', () => {
     fc.assert(
       fc.property(records, logUniform(0.1, 10), (flows, unit) => {
@@ -102,10 +102,10 @@ describe('flow-duration', () => {
     fc.assert(
       fc.property(records, (flows) => {
         const { curve, q10, q50, q80, q95 } = duration(flows)
-        curve.slice(1).forEach(({ exceedance, flow }, i) => {
-          expect(exceedance).toBeGreaterThan(curve[i]!.exceedance)
-          expect(flow).toBeLessThanOrEqual(curve[i]!.flow)
-        })
+        const isFalling = curve
+          .slice(1)
+          .every(({ exceedance, flow }, i) => exceedance > curve[i]!.exceedance && flow <= curve[i]!.flow)
+        expect(isFalling).toBe(true)
         expect(curve[0]).toEqual({ exceedance: 1 / (flows.length + 1), flow: Math.max(...flows) })
         expect(curve.at(-1)).toEqual({ exceedance: flows.length / (flows.length + 1), flow: Math.min(...flows) })
         expect(q10 >= q50 && q50 >= q80 && q80 >= q95).toBe(true)
