@@ -80,7 +80,7 @@ const checkColumns = (columns: Columns, label: string, field: string, value: unk
   for (const key of Object.keys(columns)) {
     const cell = columns[key]!
     const cellValue = value[key]
-    if (!hasPlace(cell, columns, value)) {
+    if (cell.when !== undefined && !hasPlace(cell, columns, value)) {
       if (cellValue !== undefined) throw outOfPlace(cell, `${field}.${key}`, columns)
       continue
     }
@@ -181,7 +181,7 @@ export const checkInputs = (definition: Pick<CalculatorDefinition, 'title' | 'in
     if (input.needs !== undefined && isGiven(key) && !isGiven(input.needs))
       throw new CalculationError('missing', input.needs, `${label(input.needs)} is wanted with ${input.label}.`)
 
-    if (!hasPlace(input, inputs, raw)) {
+    if (input.when !== undefined && !hasPlace(input, inputs, raw)) {
       if (isGiven(key)) throw outOfPlace(input, key, inputs)
       continue
     }

@@ -94,23 +94,27 @@ export const crossSection = {
 /** Change of resistance with temperature, 1/K from 20 °C: IEC 60287-1-1, table 1. */
 const temperatureCoefficient: Readonly<Record<Material, number>> = { copper: 0.00393, aluminium: 0.00403 }
 
-/** Sizes of IEC 60228 that a material has, mm². */
-export const sizesOf = (material: Material): number[] =>
-  conductors.rows.filter((row) => material in row).map((row) => row.crossSection)
+/** Greatest resistance of each size, class 2 of IEC 60228 at 20 °C; Ω/m by mm². */
+const at20: Readonly<Record<Material, ReadonlyMap<number, number>>> = {
+  copper: new Map(conductors.rows.map(({ crossSection, copper }) => [crossSection, copper / 1000])),
+  aluminium: new Map(
+    conductors.rows.flatMap((row) => ('aluminium' in row ? [[row.crossSection, row.aluminium / 1000]] : [])),
+  ),
+}
 
-/** Greatest resistance of a size, class 2 of IEC 60228, at a temperature; Ω/m. Refuses sizes that there are not. */
+/** Sizes of IEC 60228 that a material has, mm². */
+export const sizesOf = (material: Material): number[] => [...at20[material].keys()]
+
+/** Greatest resistance of a size at a temperature; Ω/m. Refuses sizes that there are not. */
 export const resistanceOf = (crossSection: number, material: Material, temperature: number): number => {
-  for (const row of conductors.rows) {
-    if (row.crossSection !== crossSection) continue
-    const at20 = material === 'copper' ? row.copper : 'aluminium' in row ? row.aluminium : undefined
-    if (at20 !== undefined) return (at20 / 1000) * (1 + temperatureCoefficient[material] * (temperature - 20))
-  }
-  const sizes = sizesOf(material)
-  throw new CalculationError(
-    'out-of-range',
-    'crossSection',
-    `Cable of ${material} is not made in this size: take one of ${sizes.join(', ')} mm², or give the resistance.`,
-  )
+  const cold = at20[material].get(crossSection)
+  if (cold === undefined)
+    throw new CalculationError(
+      'out-of-range',
+      'crossSection',
+      `Cable of ${material} is not made in this size: take one of ${sizesOf(material).join(', ')} mm², or give the resistance.`,
+    )
+  return cold * (1 + temperatureCoefficient[material] * (temperature - 20))
 }
 
 export interface Line {

@@ -36,7 +36,7 @@ const normalDepthOf = (channel: Channel, flow: number): number | undefined => {
     high *= 2
     if (high > 1e6) return undefined
   }
-  return bracketedRoot((depth) => flowAt(channel, depth) - flow, 0, high, { tolerance: 1e-12 })
+  return bracketedRoot((depth) => flowAt(channel, depth) - flow, 0, high, { tolerance: 1e-11 })
 }
 
 /**
